@@ -1,0 +1,6 @@
+/** @type {import('next').NextConfig} */
+export default {
+  poweredByHeader: false,
+  reactStrictMode: true,
+  typedRoutes: false,
+};
