@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { name, vector3 } from './primitives';
+import { id, name, vector3 } from './primitives';
 
 const length3 = (v: readonly number[]) => Math.hypot(v[0], v[1], v[2]);
 
@@ -40,9 +40,7 @@ export const emitterSchema = z.strictObject({
   clearance: z.number().min(0).max(5),
 });
 
-export const emitterKey = z
-  .string()
-  .regex(/^[a-z0-9][a-z0-9-]{0,39}$/, 'A key is lower-case letters, digits and hyphens');
+export const emitterKey = id;
 
 export type Tube = z.infer<typeof tubeSchema>;
 export type Emitter = z.infer<typeof emitterSchema>;
