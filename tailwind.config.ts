@@ -23,6 +23,11 @@ export default {
         umber: token('umber'),
         vermilion: token('vermilion'),
         danger: token('danger'),
+        wash: token('wash'),
+        field: token('field'),
+        'harbour-2': token('harbour-2'),
+        'on-harbour-2': token('on-harbour-2'),
+        furniture: token('furniture'),
         'danger-wash': token('danger-wash'),
       },
       fontFamily: {
