@@ -1,11 +1,11 @@
 'use client';
 
-import type { Autosave } from '@/components/hooks/use-autosave';
+import type { SaveStanding } from '@/lib/client/autosave';
 
 const clock = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-digit' });
 
 /** How saving stands, in the header. Conflicts and refusals have their own notice beside the work. */
-export function SaveStatus({ state, savedAt }: Pick<Autosave<unknown>, 'state' | 'savedAt'>) {
+export function SaveStatus({ state, savedAt }: Pick<SaveStanding, 'state' | 'savedAt'>) {
   const words = {
     saved: savedAt ? `Saved ${clock.format(savedAt)}` : 'Saved',
     unsaved: 'Not saved yet',
