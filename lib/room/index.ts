@@ -6,3 +6,4 @@ export * from './schema/stop-set';
 export * from './stop-csv';
 export * from './tape';
 export * from './times';
+export * from './to-scene';

@@ -1,5 +1,6 @@
 import type { FloorPlan } from './schema/floor-plan';
 import type { PlanPoint } from './schema/primitives';
+import { slabOf } from './to-scene';
 
 /** Walls closer to parallel than this do not fix a place between them: sin 20°. */
 const LEAST_SINE = Math.sin((20 * Math.PI) / 180);
@@ -25,16 +26,14 @@ export function wallFaces(plan: Pick<FloorPlan, 'outline' | 'outlineWalls' | 'in
     a,
     b: plan.outline[(i + 1) % plan.outline.length],
   }));
-  const inner = plan.innerWalls.flatMap(({ name, a, b, thickness }) => {
-    const span = Math.hypot(b[0] - a[0], b[1] - a[1]);
-    if (span === 0) return [];
-    const nx = (-(b[1] - a[1]) / span) * (thickness / 2);
-    const ny = ((b[0] - a[0]) / span) * (thickness / 2);
-    return [1, -1].map((side) => ({
-      wall: name,
-      a: [a[0] + side * nx, a[1] + side * ny] as PlanPoint,
-      b: [b[0] + side * nx, b[1] + side * ny] as PlanPoint,
-    }));
+  const inner = plan.innerWalls.flatMap((wall) => {
+    const slab = slabOf(wall);
+    if (!slab) return [];
+    const [a1, b1, b2, a2] = slab;
+    return [
+      { wall: wall.name, a: a1, b: b1 },
+      { wall: wall.name, a: a2, b: b2 },
+    ];
   });
   return [...outline, ...inner];
 }
