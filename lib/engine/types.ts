@@ -28,6 +28,15 @@ export interface Placement {
   readonly headingDeg: number;
 }
 
+/** An emitter pushed, lit, along a path. `headingDeg` null: along each leg; turning at a corner takes no time. */
+export interface Pass {
+  readonly emitter: Emitter;
+  readonly path: readonly Point[];
+  /** m/s */
+  readonly speed: number;
+  readonly headingDeg: number | null;
+}
+
 /** Opaque upright prism; the footprint is simple, either orientation, convex or not, and not closed. */
 export interface Solid {
   readonly polygon: readonly Point[];

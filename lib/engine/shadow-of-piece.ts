@@ -1,0 +1,154 @@
+import type { PlacedTube } from './placed-tube';
+import type { Pieces } from './prepare-scene';
+import type { Shadows } from './shadows';
+
+/**
+ * The stretch of an upright tube hidden by convex piece k from receiver p.
+ *
+ * In plan all rays run along one line; it lies inside the footprint for s in (sIn, sOut), s the fraction of the
+ * way from p. The ray to tube height h passes height p.z + s (h − p.z), so a point of the solid at height z and
+ * fraction s hides h = p.z + (z − p.z)/s: the stretch runs from the least such h (underside) to the greatest (top).
+ */
+export function shadeUpright(
+  pieces: Pieces,
+  k: number,
+  tube: PlacedTube,
+  px: number,
+  py: number,
+  pz: number,
+  shadows: Shadows,
+): void {
+  const { start, nx, ny, c } = pieces;
+  const dx = tube.ax - px;
+  const dy = tube.ay - py;
+  let sIn = 0;
+  let sOut = 1;
+  for (let i = start[k], end = start[k + 1]; i < end; i++) {
+    const out = nx[i] * px + ny[i] * py - c[i];
+    const rate = nx[i] * dx + ny[i] * dy;
+    if (rate > 0) {
+      if (out + sOut * rate > 0) sOut = -out / rate;
+    } else if (rate < 0) {
+      if (out + sIn * rate > 0) sIn = -out / rate;
+    } else if (out > 0) return;
+    if (sIn >= sOut) return;
+  }
+  const base = pieces.base[k] - pz;
+  const top = pieces.top[k] - pz;
+  const low = base >= 0 ? base / sOut : sIn > 0 ? base / sIn : -Infinity;
+  const high = top <= 0 ? top / sOut : sIn > 0 ? top / sIn : Infinity;
+  const shift = pz - tube.az;
+  const lo = (shift + low) / tube.length;
+  const hi = (shift + high) / tube.length;
+  if (lo < 1 && hi > 0) shadows.hide(lo, hi);
+}
+
+/** Scratch for clipping: a triangle cut by n sides has at most n + 3 corners. */
+export class ClipBuffer {
+  readonly s: [Float64Array, Float64Array];
+  readonly w: [Float64Array, Float64Array];
+  constructor(corners: number) {
+    this.s = [new Float64Array(corners), new Float64Array(corners)];
+    this.w = [new Float64Array(corners), new Float64Array(corners)];
+  }
+}
+
+/**
+ * The stretch of any tube hidden by convex piece k from receiver p.
+ *
+ * A point of the plane through p and the tube is p + s (a − p) + w (b − a), where w = s·t on the ray to the tube's
+ * fraction t. Every face of the solid is linear in (s, w), so its slice is the triangle of all rays clipped by the
+ * faces; t = w/s is projective, so over that convex slice it is least and greatest at corners.
+ */
+export function shadeGeneral(
+  pieces: Pieces,
+  k: number,
+  tube: PlacedTube,
+  px: number,
+  py: number,
+  pz: number,
+  t0: number,
+  t1: number,
+  shadows: Shadows,
+  buffer: ClipBuffer,
+): void {
+  const { start, nx, ny, c } = pieces;
+  const dx = tube.ax - px;
+  const dy = tube.ay - py;
+  const dz = tube.az - pz;
+  const bx = tube.ux * tube.length;
+  const by = tube.uy * tube.length;
+  const bz = tube.uz * tube.length;
+
+  let from = 0;
+  buffer.s[0][0] = 0;
+  buffer.w[0][0] = 0;
+  buffer.s[0][1] = 1;
+  buffer.w[0][1] = t0;
+  buffer.s[0][2] = 1;
+  buffer.w[0][2] = t1;
+  let corners = 3;
+
+  const first = start[k];
+  const sides = start[k + 1] - first;
+  for (let i = 0; i < sides + 2; i++) {
+    // g0 + gs·s + gw·w ≤ 0 keeps the inside of this face.
+    let g0: number;
+    let gs: number;
+    let gw: number;
+    if (i < sides) {
+      const n = nx[first + i];
+      const m = ny[first + i];
+      g0 = n * px + m * py - c[first + i];
+      gs = n * dx + m * dy;
+      gw = n * bx + m * by;
+    } else if (i === sides) {
+      g0 = pz - pieces.top[k];
+      gs = dz;
+      gw = bz;
+    } else {
+      g0 = pieces.base[k] - pz;
+      gs = -dz;
+      gw = -bz;
+    }
+    const q0 = g0 + gs + gw * t0;
+    const q1 = g0 + gs + gw * t1;
+    if (g0 > 0 && q0 > 0 && q1 > 0) return;
+    if (g0 <= 0 && q0 <= 0 && q1 <= 0) continue;
+    const s = buffer.s[from];
+    const w = buffer.w[from];
+    const s2 = buffer.s[1 - from];
+    const w2 = buffer.w[1 - from];
+    let kept = 0;
+    let ls = s[corners - 1];
+    let lw = w[corners - 1];
+    let lg = g0 + gs * ls + gw * lw;
+    for (let j = 0; j < corners; j++) {
+      const g = g0 + gs * s[j] + gw * w[j];
+      if (g > 0 !== lg > 0) {
+        const f = lg / (lg - g);
+        s2[kept] = ls + f * (s[j] - ls);
+        w2[kept++] = lw + f * (w[j] - lw);
+      }
+      if (g <= 0) {
+        s2[kept] = s[j];
+        w2[kept++] = w[j];
+      }
+      ls = s[j];
+      lw = w[j];
+      lg = g;
+    }
+    if (kept < 3) return;
+    corners = kept;
+    from = 1 - from;
+  }
+  let lo = Infinity;
+  let hi = -Infinity;
+  for (let j = 0; j < corners; j++) {
+    if (buffer.s[from][j] <= 0) continue;
+    const t = buffer.w[from][j] / buffer.s[from][j];
+    if (t < lo) lo = t;
+    if (t > hi) hi = t;
+  }
+  if (lo < hi) shadows.hide(lo, hi);
+}
