@@ -8,11 +8,12 @@ import {
   prepareScene,
   topsSurface,
 } from '@/lib/engine';
-import type { GridSurface } from '@/lib/engine/types';
+import type { GridSurface, Scene } from '@/lib/engine/types';
 import type { DoseWorker } from './protocol';
 
 interface Loaded {
   readonly key: string;
+  readonly scene: Scene;
   readonly prepared: PreparedScene;
   readonly surface: GridSurface;
 }
@@ -32,7 +33,7 @@ const worker: DoseWorker = {
     if (found) return found.surface;
     const around = { outline, voids, solids: scene.solids, step };
     const surface = choice.kind === 'plane' ? planeSurface({ ...around, z: choice.z }) : topsSurface(around);
-    rooms = [{ key, prepared: prepareScene(scene), surface }, ...rooms].slice(0, 2);
+    rooms = [{ key, scene, prepared: prepareScene(scene), surface }, ...rooms].slice(0, 2);
     return surface;
   },
 
@@ -43,17 +44,17 @@ const worker: DoseWorker = {
   },
 
   gaps(roomKey, stops, dose, target) {
-    const { prepared, surface } = roomOf(roomKey);
+    const { scene, surface } = roomOf(roomKey);
     const ratio = dose.map((value) => value / target);
     const found = findGaps(surface, ratio);
-    const causes = gapCauses({ prepared, stops, passes: [], surface, dose, target, found });
+    const { gapCauses: causes } = gapCauses({ scene, stops, surface, dose, target, ...found });
     const report = {
       gaps: found.gaps.map((gap, i) => ({
         number: gap.number,
         area: gap.area,
         lowestRatio: gap.lowestRatio,
-        cause: causes.gaps[i],
-        at: gap.at,
+        cause: causes[i],
+        at: [gap.x, gap.y] as const,
       })),
       specksArea: found.specksArea,
       labels: found.labels,
