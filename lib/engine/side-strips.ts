@@ -53,7 +53,7 @@ export function sideStrips(input: SidesInput): SideStrip[] {
         : strip(input, 'solid', index, side, p, q, base, Math.min(top, input.ceiling));
     });
   });
-  return [...walls, ...solids].filter((face) => face !== null && face.mask.includes(1)) as SideStrip[];
+  return [...walls, ...solids].filter((face): face is SideStrip => face?.mask.includes(1) ?? false);
 }
 
 function turnsRight(polygon: readonly Point[]): boolean {
