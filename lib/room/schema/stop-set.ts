@@ -45,7 +45,8 @@ export const stopSetSchema = z.strictObject({
   passes: z.array(passSchema).max(60),
 });
 
-export const stopSetStatusSchema = z.enum(['draft', 'in review', 'approved', 'withdrawn']);
+export const stopSetStatuses = ['draft', 'in review', 'approved', 'withdrawn'] as const;
+export const stopSetStatusSchema = z.enum(stopSetStatuses);
 
 export type Stop = z.infer<typeof stopSchema>;
 export type Pass = z.infer<typeof passSchema>;

@@ -1,0 +1,4 @@
+export * from './audit';
+export * from './people';
+export * from './rooms';
+export * from './stop-sets';

@@ -1,0 +1,28 @@
+import 'server-only';
+import { eq } from 'drizzle-orm';
+import type { Tx } from '@/db/client';
+import { users } from '@/db/schema';
+import { AppError } from '@/lib/errors';
+
+/** The refusal of a save over a version that is no longer the newest; says who was first. */
+export async function staleSave(
+  tx: Tx,
+  what: string,
+  held: { version: number; updatedBy: string; updatedAt: Date } | undefined,
+): Promise<AppError> {
+  const [user] = held
+    ? await tx.select({ name: users.name }).from(users).where(eq(users.id, held.updatedBy))
+    : [];
+  return new AppError(
+    'stale',
+    user
+      ? `${user.name} saved this ${what} while you were working on it. Your changes are still here and not saved.`
+      : `This ${what} has changed while you were working on it. Your changes are still here and not saved.`,
+    [],
+    {
+      etag: `"v${held?.version ?? 0}"`,
+      savedBy: user?.name ?? null,
+      savedAt: held?.updatedAt.toISOString() ?? null,
+    },
+  );
+}
