@@ -5,7 +5,8 @@ import type { Scene, Solid, Wall } from './types';
 
 /**
  * Convex upright prisms in flat arrays. Corners and sides of piece k are `start[k]` to `start[k+1]`; side i runs from
- * corner i to the next and keeps the inside at nx·x + ny·y ≤ c. Free sides are drawn in by `SKIN` and seams pushed out.
+ * corner i to the next and keeps the inside at nx·x + ny·y ≤ c. Free sides are drawn in by `SKIN` and seams pushed out;
+ * the corners x, y lie on the moved sides, so that shadows cast by corners and by sides agree.
  */
 export interface Pieces {
   readonly count: number;
@@ -21,7 +22,7 @@ export interface Pieces {
   readonly solid: Int32Array;
 }
 
-/** Walls as a start, a unit direction and a length; openings of wall k are `start[k]` to `start[k+1]`. */
+/** Walls as a start, a unit direction and a length; openings of wall k are `start[k]` to `start[k+1]`, their jambs drawn in by `SKIN`. */
 export interface Walls {
   readonly count: number;
   readonly ax: Float64Array;
@@ -78,16 +79,26 @@ function preparePieces(solids: readonly Solid[]): Pieces {
     solid: Int32Array.from(all, (piece) => piece.index),
   };
   all.forEach(({ ring, seams }, k) => {
+    // Sides first: the corners are where the moved sides meet.
     ring.forEach(([x, y], i) => {
       const [x2, y2] = ring[(i + 1) % ring.length];
       const length = Math.hypot(x2 - x, y2 - y);
       const side = start[k] + i;
-      pieces.x[side] = x;
-      pieces.y[side] = y;
       // Positive area turns x towards y, so (dy, −dx) points out.
       pieces.nx[side] = (y2 - y) / length;
       pieces.ny[side] = (x - x2) / length;
       pieces.c[side] = pieces.nx[side] * x + pieces.ny[side] * y + (seams[i] ? SKIN : -SKIN);
+    });
+    ring.forEach(([x, y], i) => {
+      const side = start[k] + i;
+      const before = start[k] + ((i + ring.length - 1) % ring.length);
+      const [nx1, ny1, nx2, ny2] = [pieces.nx[before], pieces.ny[before], pieces.nx[side], pieces.ny[side]];
+      // How far each side moved, taken at the old corner, so that the corner moves by that and keeps its digits.
+      const move1 = pieces.c[before] - nx1 * x - ny1 * y;
+      const move2 = pieces.c[side] - nx2 * x - ny2 * y;
+      const det = nx1 * ny2 - nx2 * ny1;
+      pieces.x[side] = x + (move1 * ny2 - move2 * ny1) / det;
+      pieces.y[side] = y + (nx1 * move2 - nx2 * move1) / det;
     });
   });
   return pieces;
@@ -122,8 +133,8 @@ function prepareWalls(walls: readonly Wall[]): Walls {
     uy: Float64Array.from(walls, ({ a, b }, k) => (b[1] - a[1]) / length[k]),
     length,
     start,
-    from: Float64Array.from(openings, (opening) => opening.from),
-    to: Float64Array.from(openings, (opening) => opening.to),
+    from: Float64Array.from(openings, (opening) => opening.from + SKIN),
+    to: Float64Array.from(openings, (opening) => opening.to - SKIN),
     sill: Float64Array.from(openings, (opening) => opening.sill),
     head: Float64Array.from(openings, (opening) => opening.head),
     transmittance: Float64Array.from(openings, (opening) => opening.transmittance),

@@ -92,6 +92,15 @@ export function traceTube(
   return sum;
 }
 
+/** How far beside a tube a cell that touches it is read (m): a tube is about this thick, and a map must not fail on it. */
+const BESIDE = 1e-3;
+
+/** Irradiance (W/m²) of a map cell, facing up. */
+export function traceCell(tracer: Tracer, tube: PlacedTube, x: number, y: number, z: number): number {
+  const value = traceTube(tracer, tube, x, y, z, false, 0, 0, 1);
+  return value === ON_TUBE ? traceTube(tracer, tube, x + BESIDE, y + BESIDE, z, false, 0, 0, 1) : value;
+}
+
 /** Fills the tracer's shadows with all that hides or dims the tube between the fractions t0 and t1. */
 export function traceShadows(
   { scene, shadows, buffer }: Tracer,

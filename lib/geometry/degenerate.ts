@@ -9,6 +9,7 @@
  * | seam between two pieces of one split footprint | opaque | seam sides grow by `SKIN` instead |
  * | parts stacked or set side by side, seen across the joint | opaque | hidden intervals merge within `MERGE` |
  * | ray crossing a wall at its very end or at a corner of two walls | blocked | walls grow by `SKIN` at both ends |
+ * | ray touching the jamb of an opening | blocked | openings shrink by `SKIN` along the wall |
  * | ray lying in a wall's own plane | free | a line has no thickness to hide behind |
  * | receiver or tube on a wall's line | that wall does not hide | both ends must be more than `SKIN` off it |
  * | footprint corner repeated, or on a straight line | dropped | `tidyRing` |

@@ -1,0 +1,159 @@
+import { EDGE, MERGE } from '@/lib/geometry/degenerate';
+import type { PlacedTube } from './placed-tube';
+import { RowShadows } from './row-shadows';
+import { castSilhouettes } from './silhouettes';
+import { type Tracer, traceCell } from './tracer';
+import type { GridSurface } from './types';
+
+/**
+ * Adds what an upright tube gives to every cell, facing up.
+ *
+ * With v the height of a tube element above the cell, sin θ = D/r and the cosine at the cell is v/r:
+ *   E = strength · ∫ D v / r⁴ dv = strength · D/2 · [ 1/(D² + v²) ] from the upper end to the lower
+ * (Keitz's formula turned to a level receiver; the arctangent drops out). Elements below the cell give nothing.
+ */
+export function addUprightTube(
+  tracer: Tracer,
+  tube: PlacedTube,
+  surface: GridSurface,
+  out: Float32Array,
+): void {
+  const { columns, rows, z } = surface;
+  const silhouettes = castSilhouettes(tracer.scene, surface, tube.ax, tube.ay);
+  const shadows = new RowShadows(columns, tracer.scene);
+  for (let j = 0; j < rows; j++) {
+    if (typeof z === 'number') {
+      lightRun(tracer, tube, surface, silhouettes, shadows, j, 0, columns, z, out);
+      continue;
+    }
+    const start = j * columns;
+    for (let i = 0; i < columns; ) {
+      let end = i + 1;
+      while (end < columns && z[start + end] === z[start + i]) end++;
+      lightRun(tracer, tube, surface, silhouettes, shadows, j, i, end, z[start + i], out);
+      i = end;
+    }
+  }
+}
+
+/** Lights the columns first ≤ i < end of row j, all at one height. */
+function lightRun(
+  tracer: Tracer,
+  tube: PlacedTube,
+  surface: GridSurface,
+  silhouettes: ReturnType<typeof castSilhouettes>,
+  shadows: RowShadows,
+  j: number,
+  first: number,
+  end: number,
+  z: number,
+  out: Float32Array,
+): void {
+  const v0 = Math.max(0, tube.az - z);
+  const v1 = tube.az + tube.length - z;
+  if (v1 <= 0) return;
+  const { columns, step, originX, originY, mask } = surface;
+  const y = originY + (j + 0.5) * step;
+  const dx0 = originX + 0.5 * step - tube.ax;
+  const dy = y - tube.ay;
+  const start = j * columns;
+  shadows.cast(silhouettes, j, first, end, z, v0, v1);
+  if (Math.abs(dy) <= EDGE && v0 === 0) markTouching(shadows, first, end, dx0, step);
+
+  const half = tube.strength / 2;
+  openRun(mask, out, start, first, shadows.touchedFrom, dx0, step, dy, v0, v1, half);
+  openRun(
+    mask,
+    out,
+    start,
+    Math.max(shadows.touchedFrom, shadows.touchedTo),
+    end,
+    dx0,
+    step,
+    dy,
+    v0,
+    v1,
+    half,
+  );
+
+  const { low, high, count, retrace } = shadows;
+  const least = MERGE * tube.length;
+  for (let i = shadows.touchedFrom; i < shadows.touchedTo; i++) {
+    if (mask[start + i] === 0) continue;
+    if (retrace[i] === 1) {
+      out[start + i] += traceCell(tracer, tube, originX + (i + 0.5) * step, y, z);
+      continue;
+    }
+    if (low[i] + least >= high[i]) continue;
+    const dx = dx0 + i * step;
+    const d2 = dx * dx + dy * dy;
+    const a = low[i] * low[i];
+    const b = high[i] * high[i];
+    let sum = (b - a) / ((d2 + a) * (d2 + b));
+    if (count[i] > 0) sum -= hiddenBetween(shadows, i, columns, d2, least);
+    out[start + i] += half * Math.sqrt(d2) * sum;
+  }
+}
+
+/** The open field: no shadow, no look-up, no branch but the mask. */
+function openRun(
+  mask: Uint8Array,
+  out: Float32Array,
+  start: number,
+  first: number,
+  end: number,
+  dx0: number,
+  step: number,
+  dy: number,
+  v0: number,
+  v1: number,
+  half: number,
+): void {
+  const a = v0 * v0;
+  const b = v1 * v1;
+  const k = half * (b - a);
+  const dy2 = dy * dy;
+  for (let i = first; i < end; i++) {
+    if (mask[start + i] === 0) continue;
+    const dx = dx0 + i * step;
+    const d2 = dx * dx + dy2;
+    out[start + i] += (k * Math.sqrt(d2)) / ((d2 + a) * (d2 + b));
+  }
+}
+
+/** A cell whose centre touches the tube is read beside it; only a row through the tube can hold one. */
+function markTouching(shadows: RowShadows, first: number, end: number, dx0: number, step: number): void {
+  const i = Math.round(-dx0 / step);
+  if (i < first || i >= end || Math.abs(dx0 + i * step) > EDGE) return;
+  shadows.retrace[i] = 1;
+  shadows.touchedFrom = Math.min(shadows.touchedFrom, i);
+  shadows.touchedTo = Math.max(shadows.touchedTo, i + 1);
+}
+
+/**
+ * ∑ [1/(D² + from²) − 1/(D² + to²)] over the union of a cell's hidden stretches, within its low..high.
+ * Slivers of light narrower than `least` between them or at the ends are taken as hidden too.
+ */
+function hiddenBetween(shadows: RowShadows, i: number, columns: number, d2: number, least: number): number {
+  const { from, to, low, high } = shadows;
+  let sum = 0;
+  let reached = low[i];
+  for (let n = 0; n < shadows.count[i]; n++) {
+    // Selection instead of sorting: there are one or two stretches, seldom more.
+    let next = -1;
+    let nextFrom = Infinity;
+    for (let s = 0; s < shadows.count[i]; s++) {
+      const at = s * columns + i;
+      if (to[at] > reached && from[at] < nextFrom) {
+        next = at;
+        nextFrom = from[at];
+      }
+    }
+    if (next < 0 || nextFrom >= high[i]) break;
+    const start = nextFrom <= reached + least ? reached : nextFrom;
+    const end = to[next] + least >= high[i] ? high[i] : to[next];
+    sum += (end * end - start * start) / ((d2 + start * start) * (d2 + end * end));
+    reached = end;
+  }
+  return sum;
+}

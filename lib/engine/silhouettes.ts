@@ -1,0 +1,268 @@
+import { SKIN } from '@/lib/geometry/degenerate';
+import type { Pieces, PreparedScene, Walls } from './prepare-scene';
+
+/** Where a lattice's cell centres lie; centre (i, j) is at column i and row j exactly. */
+export interface GridFrame {
+  readonly originX: number;
+  readonly originY: number;
+  readonly step: number;
+  readonly columns: number;
+  readonly rows: number;
+}
+
+/**
+ * Straight lines as the rows of a grid meet them: on row j at column `column + slope·(j − row)`, through a pivot so
+ * that nearly level lines keep their digits. `isFrom` says which side counts: columns from the line on, or up to it.
+ */
+export interface RowLines {
+  readonly column: Float64Array;
+  readonly row: Float64Array;
+  readonly slope: Float64Array;
+  readonly isFrom: Uint8Array;
+}
+
+/**
+ * Sides of the casters, as seen from a lamp at S, in the order in which a sweep from left to right meets them.
+ * `g` is the distance outside a side, linear over the grid: g = g0 + gi·i + gj·j; gLamp is its value at S. A ray from
+ * a cell crosses the side at the fraction g/(g − gLamp) of its way. `cuts` hold the ray through the side's first corner.
+ */
+export interface ShadowSides {
+  readonly g0: Float64Array;
+  readonly gi: Float64Array;
+  readonly gj: Float64Array;
+  readonly gLamp: Float64Array;
+  readonly cuts: RowLines;
+}
+
+/**
+ * The plan shadows that all convex pieces, and all walls after them, cast from one point S. The shadow of a convex
+ * caster, {S + λ(k − S), λ ≥ 1}, is convex: it is bounded by the rays through its outermost corners and by the sides
+ * that face the lamp, so on each grid row it is one stretch. Rays through the other corners cut that stretch into
+ * sectors, on each of which rays enter through one far side and leave through one near side.
+ */
+export interface Silhouettes {
+  readonly count: number;
+  /** Rows the shadow can touch: rowFrom ≤ j ≤ rowTo. */
+  readonly rowFrom: Int32Array;
+  readonly rowTo: Int32Array;
+  /** Bounds of caster k: boundStart[k] to boundStart[k+1]. */
+  readonly boundStart: Int32Array;
+  readonly bounds: RowLines;
+  /** Sides turned away from the lamp, which a ray from a cell meets first: farStart[k] to farStart[k+1]. */
+  readonly farStart: Int32Array;
+  /** Sides facing the lamp, through which it leaves; for a wall, the wall itself. */
+  readonly nearStart: Int32Array;
+  readonly far: ShadowSides;
+  readonly near: ShadowSides;
+  /** 1 when S lies within the footprint: there is no outermost corner, and the sectors go all the way round. */
+  readonly around: Uint8Array;
+  /** Rays through the jambs of opening o of the walls, at 2·o and 2·o + 1 in sweep order. */
+  readonly jambs: RowLines;
+}
+
+/** Coefficients closer to 0 than this are taken as this, so that every line crosses every row (far outside any room). */
+const LEVEL = 1e-15;
+const awayFromZero = (v: number) => (Math.abs(v) < LEVEL ? (v < 0 ? -LEVEL : LEVEL) : v);
+
+class LineList {
+  readonly column: number[] = [];
+  readonly row: number[] = [];
+  readonly slope: number[] = [];
+  readonly isFrom: number[] = [];
+  constructor(private readonly frame: GridFrame) {}
+
+  /** The line through (x, y) on whose counted side α·dx + β·dy is positive. */
+  add(x: number, y: number, alpha: number, beta: number): void {
+    const a = awayFromZero(alpha);
+    this.column.push((x - this.frame.originX) / this.frame.step - 0.5);
+    this.row.push((y - this.frame.originY) / this.frame.step - 0.5);
+    this.slope.push(-beta / a);
+    this.isFrom.push(a > 0 ? 1 : 0);
+  }
+
+  get length(): number {
+    return this.column.length;
+  }
+
+  toArrays(): RowLines {
+    return {
+      column: Float64Array.from(this.column),
+      row: Float64Array.from(this.row),
+      slope: Float64Array.from(this.slope),
+      isFrom: Uint8Array.from(this.isFrom),
+    };
+  }
+}
+
+class SideList {
+  readonly g0: number[] = [];
+  readonly gi: number[] = [];
+  readonly gj: number[] = [];
+  readonly gLamp: number[] = [];
+  readonly cuts: LineList;
+  constructor(
+    private readonly frame: GridFrame,
+    private readonly lampX: number,
+    private readonly lampY: number,
+  ) {
+    this.cuts = new LineList(frame);
+  }
+
+  /** The side with outward normal n through distance c, whose sector begins at the ray through (x, y). */
+  add(nx: number, ny: number, c: number, x: number, y: number): void {
+    const { originX, originY, step } = this.frame;
+    this.g0.push(nx * (originX + step / 2) + ny * (originY + step / 2) - c);
+    this.gi.push(nx * step);
+    this.gj.push(ny * step);
+    this.gLamp.push(nx * this.lampX + ny * this.lampY - c);
+    // cross(corner − S, p − S) ≥ 0
+    this.cuts.add(this.lampX, this.lampY, -(y - this.lampY), x - this.lampX);
+  }
+
+  get length(): number {
+    return this.g0.length;
+  }
+
+  toArrays(): ShadowSides {
+    return {
+      g0: Float64Array.from(this.g0),
+      gi: Float64Array.from(this.gi),
+      gj: Float64Array.from(this.gj),
+      gLamp: Float64Array.from(this.gLamp),
+      cuts: this.cuts.toArrays(),
+    };
+  }
+}
+
+/** Casts every piece, then every wall, from the plan point S = (lampX, lampY). Costs a few microseconds per caster. */
+export function castSilhouettes(
+  { pieces, walls }: PreparedScene,
+  frame: GridFrame,
+  lampX: number,
+  lampY: number,
+): Silhouettes {
+  const cast = new Cast(frame, lampX, lampY);
+  for (let k = 0; k < pieces.count; k++) cast.piece(pieces, k);
+  for (let k = 0; k < walls.count; k++) cast.wall(walls, k);
+  return cast.toSilhouettes();
+}
+
+type Corner = readonly [x: number, y: number];
+
+class Cast {
+  private readonly bounds: LineList;
+  private readonly far: SideList;
+  private readonly near: SideList;
+  private readonly jambs: LineList;
+  private readonly rowFrom: number[] = [];
+  private readonly rowTo: number[] = [];
+  private readonly around: number[] = [];
+  private readonly boundStart = [0];
+  private readonly farStart = [0];
+  private readonly nearStart = [0];
+
+  constructor(
+    private readonly frame: GridFrame,
+    private readonly lampX: number,
+    private readonly lampY: number,
+  ) {
+    this.bounds = new LineList(frame);
+    this.jambs = new LineList(frame);
+    this.far = new SideList(frame, lampX, lampY);
+    this.near = new SideList(frame, lampX, lampY);
+  }
+
+  /** Rings turn x towards y, so along the far sides the sweep runs with the ring and along the near sides against it. */
+  piece({ start, x, y, nx, ny, c }: Pieces, k: number): void {
+    const first = start[k];
+    const n = start[k + 1] - first;
+    const at = (i: number) => first + ((i + n) % n);
+    const isFar = (i: number) => nx[at(i)] * this.lampX + ny[at(i)] * this.lampY <= c[at(i)];
+    let begin = 0;
+    while (begin < n && !(isFar(begin) && !isFar(begin - 1))) begin++;
+    const inside = begin === n;
+    if (inside) begin = 0;
+    let end = begin;
+    while (end < begin + n && isFar(end)) {
+      const i = at(end);
+      this.far.add(nx[i], ny[i], c[i], x[i], y[i]);
+      end++;
+    }
+    for (let j = begin + n - 1; j >= end; j--) {
+      const i = at(j);
+      this.near.add(nx[i], ny[i], c[i], x[at(j + 1)], y[at(j + 1)]);
+      this.bounds.add(...pointOn(nx[i], ny[i], x[i], y[i]));
+    }
+    const ys = y.subarray(first, first + n);
+    const corner = (i: number): Corner => [x[at(i)], y[at(i)]];
+    if (inside) this.close(null, ys);
+    else this.close([corner(begin), corner(end)], ys);
+  }
+
+  wall({ ax, ay, ux, uy, length, start, from, to }: Walls, k: number): void {
+    const point = (along: number): Corner => [ax[k] + along * ux[k], ay[k] + along * uy[k]];
+    // The normal that points to the lamp; the sweep meets b first when a lies to its right.
+    const distance = uy[k] * (this.lampX - ax[k]) - ux[k] * (this.lampY - ay[k]);
+    const side = distance > 0 ? 1 : -1;
+    const [nx, ny] = [side * uy[k], -side * ux[k]];
+    const sweep = (low: number, high: number): [Corner, Corner] =>
+      side > 0 ? [point(high), point(low)] : [point(low), point(high)];
+    const ends = sweep(-SKIN, length[k] + SKIN);
+    this.near.add(nx, ny, nx * ax[k] + ny * ay[k], ...ends[0]);
+    // Beyond the wall by more than the skin, so that a receiver on it is not hidden by it.
+    this.bounds.add(...pointOn(nx, ny, ends[0][0] - SKIN * nx, ends[0][1] - SKIN * ny));
+    for (let o = start[k]; o < start[k + 1]; o++) {
+      for (const [x, y] of sweep(from[o], to[o])) {
+        this.jambs.add(this.lampX, this.lampY, -(y - this.lampY), x - this.lampX);
+      }
+    }
+    this.close(ends, Float64Array.of(ends[0][1], ends[1][1]));
+    // A lamp on the wall's line is not hidden by it.
+    if (Math.abs(distance) <= SKIN) this.rowTo[this.rowTo.length - 1] = -1;
+  }
+
+  /** Ends a caster: the rays through its outermost corners, first and last in the sweep, and the rows they leave it. */
+  private close(outermost: readonly [Corner, Corner] | null, ys: Float64Array): void {
+    const { lampX, lampY, frame } = this;
+    let rowFrom = 0;
+    let rowTo = frame.rows - 1;
+    if (outermost) {
+      const [first, last] = outermost;
+      this.bounds.add(lampX, lampY, -(first[1] - lampY), first[0] - lampX);
+      this.bounds.add(lampX, lampY, last[1] - lampY, -(last[0] - lampX));
+      const row = (y: number) => (y - frame.originY) / frame.step - 0.5;
+      if (first[1] >= lampY && last[1] >= lampY) rowFrom = Math.max(0, Math.ceil(row(Math.min(...ys))));
+      if (first[1] <= lampY && last[1] <= lampY) rowTo = Math.min(rowTo, Math.floor(row(Math.max(...ys))));
+    }
+    this.rowFrom.push(rowFrom);
+    this.rowTo.push(rowTo);
+    this.around.push(outermost ? 0 : 1);
+    this.boundStart.push(this.bounds.length);
+    this.farStart.push(this.far.length);
+    this.nearStart.push(this.near.length);
+  }
+
+  toSilhouettes(): Silhouettes {
+    return {
+      count: this.rowFrom.length,
+      rowFrom: Int32Array.from(this.rowFrom),
+      rowTo: Int32Array.from(this.rowTo),
+      boundStart: Int32Array.from(this.boundStart),
+      bounds: this.bounds.toArrays(),
+      farStart: Int32Array.from(this.farStart),
+      nearStart: Int32Array.from(this.nearStart),
+      far: this.far.toArrays(),
+      near: this.near.toArrays(),
+      around: Uint8Array.from(this.around),
+      jambs: this.jambs.toArrays(),
+    };
+  }
+}
+
+/** The inside of a side as a line to be kept on: through (x, y), counted against the outward normal. */
+const pointOn = (nx: number, ny: number, x: number, y: number): [number, number, number, number] => [
+  x,
+  y,
+  -nx,
+  -ny,
+];
