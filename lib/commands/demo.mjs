@@ -7,19 +7,22 @@ import { installPackages, root, run, start, tool } from './steps.mjs';
 const port = process.env.PORT ?? '3000';
 const address = `http://localhost:${port}`;
 const dataFolder = path.join(root, 'data');
-const secretFile = path.join(dataFolder, 'demo-secret');
 
 installPackages();
 
 mkdirSync(dataFolder, { recursive: true });
-// Made once and kept, so that a restart does not sign everybody out.
-if (!existsSync(secretFile))
-  writeFileSync(secretFile, randomBytes(32).toString('base64url'), { mode: 0o600 });
+// Made once and kept, so that a restart neither signs everybody out nor changes the password.
+const kept = (name, bytes) => {
+  const file = path.join(dataFolder, name);
+  if (!existsSync(file)) writeFileSync(file, randomBytes(bytes).toString('base64url'), { mode: 0o600 });
+  return readFileSync(file, 'utf8').trim();
+};
 
 const env = {
   NODE_ENV: 'production',
   DATABASE_URL: process.env.DATABASE_URL ?? `file:${path.join(dataFolder, 'leeside.db')}`,
-  NEXTAUTH_SECRET: readFileSync(secretFile, 'utf8').trim(),
+  NEXTAUTH_SECRET: kept('demo-secret', 32),
+  DEMO_PASSWORD: process.env.DEMO_PASSWORD ?? kept('demo-password', 9),
   NEXTAUTH_URL: address,
   PORT: port,
 };

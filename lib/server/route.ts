@@ -13,6 +13,10 @@ export interface Answer<T> {
   readonly status?: number;
   /** Version of the thing: becomes the ETag. */
   readonly version?: number;
+  /** Name to save the answer under. */
+  readonly download?: string;
+  /** Content type of an answer that is text, not JSON. */
+  readonly type?: string;
 }
 
 interface RouteSpec<P extends z.ZodType, B extends z.ZodType, A extends z.ZodType> {
@@ -75,6 +79,15 @@ function check<S extends z.ZodType>(schema: S, value: unknown, words: string): z
   return parsed.data;
 }
 
+function respond({ status = 200, version, download, type }: Answer<unknown>, value: unknown): Response {
+  const headers: Record<string, string> = { 'cache-control': 'no-store' };
+  if (version !== undefined) headers.etag = toEtag(version);
+  if (download) headers['content-disposition'] = `attachment; filename="${download}"`;
+  if (status === 204) return new Response(null, { status, headers });
+  if (type) return new Response(String(value), { status, headers: { ...headers, 'content-type': type } });
+  return Response.json(value, { status, headers });
+}
+
 /**
  * The one place where a route's guard stands: signed in, allowed, of our own pages; then parse, one use case,
  * parse the answer. Refusals are problem+json.
@@ -106,10 +119,7 @@ export const route =
         body: body as z.infer<B>,
         expected: () => expectedVersion(request),
       });
-      const headers: Record<string, string> = { 'cache-control': 'no-store' };
-      if (result.version !== undefined) headers.etag = toEtag(result.version);
-      if (result.status === 204) return new Response(null, { status: 204, headers });
-      return Response.json(spec.answer.parse(result.value), { status: result.status ?? 200, headers });
+      return respond(result, spec.answer.parse(result.value));
     } catch (error) {
       return problem(error);
     }

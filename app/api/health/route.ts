@@ -1,0 +1,15 @@
+import { database } from '@/lib/server/database';
+
+/** Says that the server is up and its database answers; nothing more, to anyone. */
+export async function GET(): Promise<Response> {
+  try {
+    const { db } = await database();
+    await db.run('select 1');
+    return Response.json({ ok: true });
+  } catch (error) {
+    console.error(error);
+    return Response.json({ ok: false }, { status: 503 });
+  }
+}
+
+export const dynamic = 'force-dynamic';

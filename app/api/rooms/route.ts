@@ -1,0 +1,22 @@
+import { newRoomSchema, roomListSchema, roomSummarySchema } from '@/lib/room/api/resources';
+import { database } from '@/lib/server/database';
+import { createRoom } from '@/lib/server/rooms/create-room';
+import { getRoom, listRooms } from '@/lib/server/rooms/list-rooms';
+import { route } from '@/lib/server/route';
+
+export const GET = route({
+  permission: 'rooms:read',
+  answer: roomListSchema,
+  run: async ({ actor }) => ({ value: { rooms: await listRooms((await database()).db, actor) } }),
+});
+
+export const POST = route({
+  permission: 'rooms:write',
+  body: newRoomSchema,
+  answer: roomSummarySchema,
+  run: async ({ actor, body }) => {
+    const open = await database();
+    const id = await createRoom(open, actor, body);
+    return { value: await getRoom(open.db, actor, id), status: 201 };
+  },
+});
