@@ -26,8 +26,8 @@ export function StopsLayer({
   selectedId: string | null;
   editable: boolean;
   onSelect: (id: string) => void;
-  /** While the hand moves, in plan metres. */
-  onMove: (id: string, at: [number, number]) => void;
+  /** While the hand moves, in plan metres; `free` when Alt is held: no snapping. */
+  onMove: (id: string, at: [number, number], free: boolean) => void;
   onMoveEnd: () => void;
   onTurn: (id: string, headingDeg: number) => void;
   onTurnEnd: () => void;
@@ -60,11 +60,11 @@ export function StopsLayer({
             }}
             onDragMove={(event) => {
               if (event.target.name() !== 'stop') return;
-              onMove(stop.id, [event.target.x(), event.target.y()]);
+              onMove(stop.id, [event.target.x(), event.target.y()], event.evt.altKey);
             }}
             onDragEnd={(event) => {
               if (event.target.name() !== 'stop') return;
-              onMove(stop.id, [event.target.x(), event.target.y()]);
+              onMove(stop.id, [event.target.x(), event.target.y()], event.evt.altKey);
               onMoveEnd();
             }}
           >

@@ -1,20 +1,14 @@
+import { signedArea } from '@/lib/geometry/polygon';
 import type { FloorPlan, InnerWall, Opening } from '@/lib/room/schema/floor-plan';
 import type { PlanPoint } from '@/lib/room/schema/primitives';
 import { slabOf } from '@/lib/room/to-scene';
-
-/** Twice the signed area: positive when the corners run clockwise on screen (y down). */
-export const doubleArea = (polygon: readonly PlanPoint[]): number =>
-  polygon.reduce((sum, [x, y], i) => {
-    const [nx, ny] = polygon[(i + 1) % polygon.length];
-    return sum + x * ny - nx * y;
-  }, 0);
 
 /** Unit vector out of the room across side `edge` of the outline. */
 export function outward(outline: readonly PlanPoint[], edge: number): PlanPoint {
   const [ax, ay] = outline[edge];
   const [bx, by] = outline[(edge + 1) % outline.length];
   const span = Math.hypot(bx - ax, by - ay) || 1;
-  const turn = doubleArea(outline) > 0 ? 1 : -1;
+  const turn = signedArea(outline) > 0 ? 1 : -1;
   return [(turn * (by - ay)) / span, (-turn * (bx - ax)) / span];
 }
 
