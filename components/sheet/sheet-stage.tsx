@@ -35,9 +35,13 @@ export interface SheetStageProps {
   overlay?: ReactNode;
   titleBlock?: readonly { label: string; value: string }[];
   cursor?: string;
-  onPointerDown?: (pointer: SheetPointer) => void;
+  /** Answering 'pan' leaves the rest of this pointer's way to moving the sheet. */
+  // biome-ignore lint/suspicious/noConfusingVoidType: most pages only act and answer nothing.
+  onPointerDown?: (pointer: SheetPointer) => 'pan' | void;
   onPointerMove?: (pointer: SheetPointer) => void;
   onPointerUp?: (pointer: SheetPointer) => void;
+  /** The pointer was taken away half-way: a second finger came down, or the system took it. */
+  onInterrupt?: () => void;
   onDoubleClick?: (pointer: SheetPointer) => void;
   onPointerLeave?: () => void;
 }
@@ -67,16 +71,16 @@ export function SheetStage(props: SheetStageProps) {
       }
     );
   };
-  const pass = (event: Konva.KonvaEventObject<PointerEvent>, to?: (pointer: SheetPointer) => void) => {
+  const pass = <T,>(event: Konva.KonvaEventObject<PointerEvent>, to?: (pointer: SheetPointer) => T) => {
     const where = pointer(event);
-    if (where && !panning.busy()) to?.(where);
+    return where && !panning.busy() ? to?.(where) : undefined;
   };
 
   return (
     <div
       ref={frame}
       className="relative h-full min-h-0 w-full touch-none overflow-hidden border border-rule bg-[#fcfbf7] shadow-sm sheet-paper"
-      style={{ cursor: panning.spaceHeld ? 'grab' : props.cursor }}
+      style={{ cursor: panning.moving ? 'grabbing' : panning.spaceHeld ? 'grab' : props.cursor }}
     >
       {size.width > 0 ? (
         <Stage
@@ -86,8 +90,10 @@ export function SheetStage(props: SheetStageProps) {
           aria-label={props.label}
           onWheel={control.onWheel}
           onPointerDown={(event) => {
-            panning.down(event);
-            pass(event, props.onPointerDown);
+            // A drag goes on outside the sheet's edge.
+            if (event.evt.target instanceof Element) event.evt.target.setPointerCapture(event.evt.pointerId);
+            if (panning.down(event)) props.onInterrupt?.();
+            if (pass(event, props.onPointerDown) === 'pan') panning.take(event);
           }}
           onPointerMove={(event) => {
             if (!panning.move(event)) pass(event, props.onPointerMove);
@@ -96,7 +102,10 @@ export function SheetStage(props: SheetStageProps) {
             pass(event, props.onPointerUp);
             panning.up(event);
           }}
-          onPointerCancel={panning.up}
+          onPointerCancel={(event) => {
+            panning.up(event);
+            props.onInterrupt?.();
+          }}
           onDblClick={(event: Konva.KonvaEventObject<MouseEvent>) =>
             pass(event as unknown as Konva.KonvaEventObject<PointerEvent>, props.onDoubleClick)
           }

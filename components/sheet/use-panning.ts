@@ -17,6 +17,7 @@ export const isTyping = (target: EventTarget | null): boolean =>
  */
 export function usePanning({ pan, zoomBy, fitAll }: ViewportControl) {
   const [spaceHeld, setSpaceHeld] = useState(false);
+  const [moving, setMoving] = useState(false);
   const pointers = useRef(new Map<number, { x: number; y: number }>());
   const dragging = useRef<number | null>(null);
 
@@ -44,9 +45,17 @@ export function usePanning({ pan, zoomBy, fitAll }: ViewportControl) {
 
   const place = ({ evt }: Pointing) => ({ x: evt.clientX, y: evt.clientY });
 
-  const down = (event: Pointing): void => {
+  /** From now on this pointer moves the sheet. */
+  const take = ({ evt }: Pointing): void => {
+    dragging.current = evt.pointerId;
+    setMoving(true);
+  };
+
+  /** True when this is a second finger: what the first had begun is over. */
+  const down = (event: Pointing): boolean => {
     pointers.current.set(event.evt.pointerId, place(event));
-    if (spaceHeld || event.evt.button === 1) dragging.current = event.evt.pointerId;
+    if (spaceHeld || event.evt.button === 1) take(event);
+    return pointers.current.size > 1;
   };
 
   /** True when the move was a pan or a pinch. */
@@ -75,10 +84,12 @@ export function usePanning({ pan, zoomBy, fitAll }: ViewportControl) {
 
   const up = (event: Pointing): void => {
     pointers.current.delete(event.evt.pointerId);
-    if (dragging.current === event.evt.pointerId) dragging.current = null;
+    if (dragging.current !== event.evt.pointerId) return;
+    dragging.current = null;
+    setMoving(false);
   };
 
   const busy = () => dragging.current !== null || pointers.current.size > 1;
 
-  return { down, move, up, busy, spaceHeld };
+  return { down, take, move, up, busy, spaceHeld, moving };
 }

@@ -2,8 +2,9 @@
 
 import { useMemo } from 'react';
 import { Arc, Group, Line, Shape } from 'react-konva';
-import { innerSlabs, type OpeningShape, openingShape, outerFace, wallRuns } from '@/lib/drawing/wall-shapes';
+import { innerSlabs, type OpeningShape, openingShape, outerFace } from '@/lib/drawing/wall-shapes';
 import type { FloorPlan } from '@/lib/room';
+import { wallRuns } from '@/lib/room/wall-geometry';
 import { toDegrees } from '@/lib/units';
 import { ink } from './ink';
 

@@ -1,16 +1,7 @@
-import { signedArea } from '@/lib/geometry/polygon';
-import type { FloorPlan, InnerWall, Opening } from '@/lib/room/schema/floor-plan';
+import type { FloorPlan, Opening } from '@/lib/room/schema/floor-plan';
 import type { PlanPoint } from '@/lib/room/schema/primitives';
 import { slabOf } from '@/lib/room/to-scene';
-
-/** Unit vector out of the room across side `edge` of the outline. */
-export function outward(outline: readonly PlanPoint[], edge: number): PlanPoint {
-  const [ax, ay] = outline[edge];
-  const [bx, by] = outline[(edge + 1) % outline.length];
-  const span = Math.hypot(bx - ax, by - ay) || 1;
-  const turn = signedArea(outline) > 0 ? 1 : -1;
-  return [(turn * (by - ay)) / span, (-turn * (bx - ax)) / span];
-}
+import { onWall, outward, type WallRun } from '@/lib/room/wall-geometry';
 
 /** A mitre longer than this many thicknesses is cut: a needle of wall is not built either. */
 const LONGEST_MITRE = 3;
@@ -44,65 +35,6 @@ export function outerFace(plan: Pick<FloorPlan, 'outline' | 'outlineWalls'>): Pl
     return [corner[0] + dx, corner[1] + dy];
   });
 }
-
-/** Where a wall runs and how thick it is on each side of that line. */
-export interface WallRun {
-  /** `outline:<edge>` or the inner wall's id, as openings name it. */
-  readonly id: string;
-  readonly name: string;
-  readonly a: PlanPoint;
-  readonly b: PlanPoint;
-  readonly length: number;
-  /** Unit vector along the wall. */
-  readonly along: PlanPoint;
-  /** Unit vector across it: out of the room for the outline. */
-  readonly across: PlanPoint;
-  /** From the line a→b: metres of wall toward `across` and away from it. */
-  readonly ahead: number;
-  readonly behind: number;
-}
-
-function runOf(
-  id: string,
-  name: string,
-  a: PlanPoint,
-  b: PlanPoint,
-  across: PlanPoint,
-  ahead: number,
-  behind: number,
-): WallRun {
-  const length = Math.hypot(b[0] - a[0], b[1] - a[1]);
-  const along: PlanPoint = length ? [(b[0] - a[0]) / length, (b[1] - a[1]) / length] : [1, 0];
-  return { id, name, a, b, length, along, across, ahead, behind };
-}
-
-const innerRun = ({ id, name, a, b, thickness }: InnerWall): WallRun => {
-  const length = Math.hypot(b[0] - a[0], b[1] - a[1]) || 1;
-  const across: PlanPoint = [-(b[1] - a[1]) / length, (b[0] - a[0]) / length];
-  return runOf(id, name, a, b, across, thickness / 2, thickness / 2);
-};
-
-/** Every wall of the plan, outline first, in the order openings count them. */
-export const wallRuns = (plan: Pick<FloorPlan, 'outline' | 'outlineWalls' | 'innerWalls'>): WallRun[] => [
-  ...plan.outline.map((a, edge) =>
-    runOf(
-      `outline:${edge}`,
-      plan.outlineWalls[edge]?.name ?? `wall ${edge + 1}`,
-      a,
-      plan.outline[(edge + 1) % plan.outline.length],
-      outward(plan.outline, edge),
-      plan.outlineWalls[edge]?.thickness ?? 0,
-      0,
-    ),
-  ),
-  ...plan.innerWalls.map(innerRun),
-];
-
-/** A spot `s` metres along a wall and `t` across it. */
-export const onWall = ({ a, along, across }: WallRun, s: number, t: number): PlanPoint => [
-  a[0] + along[0] * s + across[0] * t,
-  a[1] + along[1] * s + across[1] * t,
-];
 
 export interface OpeningShape {
   readonly opening: Opening;
