@@ -1,12 +1,16 @@
 'use client';
 
 import { Group, Line, Text } from 'react-konva';
+import { signedArea } from '@/lib/geometry/polygon';
 import { type Furniture, footprintInPlan } from '@/lib/room';
 import { ink } from './ink';
 import { useSheetScale } from './sheet-scale';
 
-/** Top of the highest part, as written beside the name. */
-const topOf = (piece: Furniture): number => Math.max(...piece.parts.map((part) => part.top));
+/** Top of the largest part, as written beside the name: a bed's mattress, not its headboard. */
+const topOf = (piece: Furniture): number =>
+  piece.parts.reduce((largest, part) =>
+    Math.abs(signedArea(part.footprint)) > Math.abs(signedArea(largest.footprint)) ? part : largest,
+  ).top;
 
 /**
  * Furniture in plan. On a dose map the parts that the chosen plane cuts are filled, since no dose is read in

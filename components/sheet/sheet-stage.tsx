@@ -10,6 +10,7 @@ import { Rulers } from './rulers';
 import { SheetScaleProvider } from './sheet-scale';
 import { TitleBlock } from './title-block';
 import { usePanning } from './use-panning';
+import { useSheetFonts } from './use-sheet-fonts';
 import { useElementSize, useViewport } from './use-viewport';
 
 /** A pointer on the sheet: where in the plan, what is under it, and the event itself. */
@@ -53,6 +54,7 @@ export interface SheetStageProps {
 export function SheetStage(props: SheetStageProps) {
   const frame = useRef<HTMLDivElement>(null);
   const size = useElementSize(frame);
+  const fontsReady = useSheetFonts();
   const control = useViewport(props.bounds, size);
   const panning = usePanning(control);
   const { viewport } = control;
@@ -82,7 +84,7 @@ export function SheetStage(props: SheetStageProps) {
       className="relative h-full min-h-0 w-full touch-none overflow-hidden border border-rule bg-[#fcfbf7] shadow-sm sheet-paper"
       style={{ cursor: panning.moving ? 'grabbing' : panning.spaceHeld ? 'grab' : props.cursor }}
     >
-      {size.width > 0 ? (
+      {size.width > 0 && fontsReady ? (
         <Stage
           width={size.width}
           height={size.height}

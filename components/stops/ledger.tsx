@@ -5,6 +5,7 @@ import { type ReactNode, useMemo, useState } from 'react';
 import type { DoseView } from '@/components/hooks/dose-session';
 import { Button } from '@/components/ui/button';
 import { SelectField } from '@/components/ui/field';
+import { IconButton } from '@/components/ui/icon-button';
 import { Notice } from '@/components/ui/notice';
 import { stopSetCsvAddress } from '@/lib/client/stop-sets';
 import { moveStop, renameStop, setStopEmitter, turnStop } from '@/lib/editor/stop-set-actions';
@@ -217,11 +218,5 @@ export function Ledger({
         />
       ) : null}
     </aside>
-  );
-}
-
-function IconButton({ label, icon, onClick }: { label: string; icon: ReactNode; onClick: () => void }) {
-  return (
-    <Button aria-label={label} title={label} className="w-9 shrink-0 px-0" icon={icon} onClick={onClick} />
   );
 }

@@ -6,10 +6,10 @@ export function TargetLine({ set }: { set: StopSet }) {
   const required = toMillijoulesPerCm2(requiredDose(set));
   const target = toMillijoulesPerCm2(set.target.dose);
   return (
-    <p className="text-[14.5px]" title={set.target.source || 'No source given'}>
+    <p className="text-[14.5px]" title={`${set.target.name}. ${set.target.source || 'No source given'}`}>
       Target <strong>{Number(required.toPrecision(4))} mJ/cm²</strong>{' '}
       <span className="text-ink-2">
-        · {set.target.name}, {Number(target.toPrecision(4))} × margin {set.margin}
+        · {Number(target.toPrecision(4))} × margin {set.margin}
       </span>
     </p>
   );
