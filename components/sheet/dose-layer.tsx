@@ -5,6 +5,7 @@ import { useMemo } from 'react';
 import { Group, Label, Shape, Tag, Text } from 'react-konva';
 import type { DosePicture } from '@/components/hooks/dose-session';
 import { doseImage, regionEdges } from '@/lib/drawing/dose-image';
+import { finerGrid } from '@/lib/drawing/finer-grid';
 import { hatchLines } from '@/lib/drawing/hatch';
 import type { GapsReport } from '@/workers/protocol';
 import { useSheetScale } from './sheet-scale';
@@ -30,7 +31,12 @@ function strokeSegments(context: Konva.Context, segments: readonly number[]) {
 /** The dose map on the sheet: colour steps, hatching and a drawn edge round what is under target. Metres. */
 export function DoseLayer({ picture }: { picture: DosePicture }) {
   const pxPerMetre = useSheetScale();
-  const { surface, ratio } = picture;
+  // A drawn cell is about two pixels: no stairs where the eye would see them, no work where it would not.
+  const parts = Math.max(1, Math.min(4, Math.round((picture.surface.step * pxPerMetre) / 2)));
+  const { surface, ratio } = useMemo(
+    () => finerGrid(picture.surface, picture.ratio, parts),
+    [picture.surface, picture.ratio, parts],
+  );
   const canvas = useMemo(
     () => toCanvas(surface.columns, surface.rows, doseImage(surface, ratio)),
     [surface, ratio],

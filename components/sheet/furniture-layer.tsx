@@ -102,6 +102,10 @@ function FurniturePiece({
           fontStyle="500"
           fontSize={12}
           fill={ink.text}
+          stroke={ink.paper}
+          strokeWidth={3}
+          fillAfterStrokeEnabled
+          lineJoin="round"
         />
       ) : null}
     </Group>

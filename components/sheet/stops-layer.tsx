@@ -8,6 +8,8 @@ import { useSheetScale } from './sheet-scale';
 const HARBOUR = '#12323f';
 const PAPER = '#fcfbf7';
 const LAMP = '#e0b45c';
+/** Pixels per metre below which dwells would lie on top of each other; the ledger has them. */
+const ROOM_FOR_DWELL = 30;
 /** Distance of the turning handle from the stop's mark, in pixels. */
 const HANDLE_PX = 38;
 
@@ -32,7 +34,8 @@ export function StopsLayer({
   onTurn: (id: string, headingDeg: number) => void;
   onTurnEnd: () => void;
 }) {
-  const px = 1 / useSheetScale();
+  const scale = useSheetScale();
+  const px = 1 / scale;
   return (
     <Group>
       <Line
@@ -103,7 +106,7 @@ export function StopsLayer({
                 fontSize={15}
                 fill={PAPER}
               />
-              <Label x={19} y={-10} listening={false}>
+              <Label x={26} y={-10} listening={false} visible={selected || scale >= ROOM_FOR_DWELL}>
                 <Tag fill={PAPER} stroke="#1e2326" strokeWidth={1.2} />
                 <Text
                   text={formatDuration(stop.dwell)}

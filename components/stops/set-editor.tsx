@@ -6,6 +6,7 @@ import { useEditing } from '@/components/hooks/edit-store';
 import { useAutosave } from '@/components/hooks/use-autosave';
 import { useDose } from '@/components/hooks/use-dose';
 import { useEditKeys } from '@/components/hooks/use-edit-keys';
+import { sheetProportion } from '@/components/sheet/proportion';
 import { DeskHeader, roomTabs } from '@/components/shell/desk-header';
 import { ConflictNotice } from '@/components/ui/conflict-notice';
 import { Rail, RailAction, type RailTool } from '@/components/ui/rail';
@@ -130,7 +131,7 @@ export function SetEditor(props: SetEditorProps) {
             <SurfacePicker value={surface} onChange={setSurface} />
             <TargetLine set={set} />
           </div>
-          <div className="min-h-0 flex-1 max-lg:h-[62vh] max-lg:flex-none">
+          <div className="sheet-frame min-h-0 flex-1" style={sheetProportion(plan.outline)}>
             <DoseSheet
               plan={plan}
               set={set}

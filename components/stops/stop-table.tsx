@@ -71,7 +71,7 @@ export function StopTable({
                   aria-label={`Stop ${stop.name}`}
                   onClick={() => onSelect(selected ? null : stop.id)}
                   onKeyDown={(event) => onKey(event, stop.id)}
-                  className="mr-2.5 grid h-[22px] min-w-[22px] place-items-center rounded-full bg-[#12323f] px-1.5 font-condensed text-sm font-semibold text-[#f4efe4]"
+                  className="mr-2.5 grid h-[22px] min-w-[22px] place-items-center rounded-full bg-[#12323f] px-1.5 font-condensed text-sm font-semibold text-[#f4efe4] ring-1 ring-ink-2/50"
                 >
                   {stop.name}
                 </button>

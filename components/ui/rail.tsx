@@ -26,7 +26,7 @@ export function Rail<T extends string>({
     <div
       role="toolbar"
       aria-label="Tools"
-      className="flex shrink-0 gap-1 overflow-x-auto border-rule bg-desk p-1.5 max-lg:order-last max-lg:border-t lg:w-16 lg:flex-col lg:border-r"
+      className="flex shrink-0 gap-1 overflow-x-auto border-rule bg-desk p-1.5 max-lg:sticky max-lg:bottom-0 max-lg:z-20 max-lg:order-last max-lg:border-t lg:w-16 lg:flex-col lg:border-r"
     >
       {tools.map((tool) => (
         <button
