@@ -40,6 +40,8 @@ export interface DoseView {
   readonly pending: number;
   readonly asked: number;
   readonly failure: string | null;
+  /** The stop set that picture and gaps both belong to; `null` while either is still to come. */
+  readonly settledFor: StopSet | null;
 }
 
 interface StopMap {
@@ -52,7 +54,14 @@ interface StopMap {
  * moved; a dwell only re-adds. The picture is renewed as maps come in, the gaps once nothing is pending.
  */
 export class DoseSession {
-  private view: DoseView = { picture: null, gaps: null, pending: 0, asked: 0, failure: null };
+  private view: DoseView = {
+    picture: null,
+    gaps: null,
+    pending: 0,
+    asked: 0,
+    failure: null,
+    settledFor: null,
+  };
   private input: DoseInput | null = null;
   private planOfRoom: FloorPlan | null = null;
   private room: RoomJob | null = null;
@@ -100,7 +109,7 @@ export class DoseSession {
     this.surface = null;
     this.maps = new Map();
     this.inFlight = new Map();
-    this.say({ pending: 1, asked: 1, failure: null });
+    this.say({ pending: 1, asked: 1, failure: null, settledFor: null });
     try {
       const grid = await this.pool.surface(room);
       if (this.room !== room) return;
@@ -181,7 +190,8 @@ export class DoseSession {
     });
     try {
       const gaps = await this.pool.gaps(room, stops, dose, target);
-      if (this.room === room && this.view.picture?.dose === dose) this.say({ gaps, asked: 0 });
+      if (this.room === room && this.view.picture?.dose === dose)
+        this.say({ gaps, asked: 0, settledFor: input.set });
     } catch (error) {
       this.fail(error, room);
     }

@@ -4,7 +4,14 @@ import { useEffect, useState, useSyncExternalStore } from 'react';
 import { DosePool, startDoseThread } from '@/workers/pool';
 import { type DoseInput, DoseSession, type DoseView } from './dose-session';
 
-const nothingYet: DoseView = { picture: null, gaps: null, pending: 1, asked: 1, failure: null };
+const nothingYet: DoseView = {
+  picture: null,
+  gaps: null,
+  pending: 1,
+  asked: 1,
+  failure: null,
+  settledFor: null,
+};
 const noSubscription = () => () => {};
 
 /** The dose picture of `input`, kept up to date by workers that live as long as the component. */

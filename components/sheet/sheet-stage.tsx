@@ -81,6 +81,8 @@ export function SheetStage(props: SheetStageProps) {
   return (
     <div
       ref={frame}
+      // Where the plan is on the sheet: pixels per metre and the plan's origin, for whoever points at it from outside.
+      data-sheet={`${viewport.scale} ${viewport.x} ${viewport.y}`}
       className="relative h-full min-h-0 w-full touch-none overflow-hidden border border-rule bg-[#fcfbf7] shadow-sm sheet-paper"
       style={{ cursor: panning.moving ? 'grabbing' : panning.spaceHeld ? 'grab' : props.cursor }}
     >

@@ -68,6 +68,7 @@ export function Ledger({
   const times = useMemo(() => timesOf(set, emitters), [set, emitters]);
   const problems = useMemo(() => stopProblems(set, plan, emitters), [set, plan, emitters]);
   const stop = set.stops.find((it) => it.id === selectedStopId);
+  const settled = dose.settledFor === set;
 
   /** What is on the desk is saved first: another set, a copy or a file must not leave the newest edit behind. */
   const saved = (work: () => Promise<unknown>) => async () => {
@@ -83,6 +84,8 @@ export function Ledger({
   return (
     <aside
       aria-label="Ledger"
+      aria-busy={!settled}
+      data-dose={settled ? 'settled' : 'pending'}
       className="flex w-[376px] shrink-0 flex-col gap-5 overflow-y-auto border-l bg-panel px-5 py-4 max-lg:w-full max-lg:border-t max-lg:border-l-0"
     >
       {notice}
