@@ -17,3 +17,6 @@ export type Permission = keyof typeof permissions;
 
 export const can = (role: Role, permission: Permission): boolean =>
   (permissions[permission].roles as readonly Role[]).includes(role);
+
+export const permissionsOf = (role: Role): Permission[] =>
+  (Object.keys(permissions) as Permission[]).filter((permission) => can(role, permission));

@@ -2,10 +2,12 @@ import 'server-only';
 import { z } from 'zod';
 import { can, type Permission } from '@/lib/access/permissions';
 import { AppError } from '@/lib/errors';
+import { etagOf, versionOf } from '@/lib/room/api/etag';
 import { describeFaults } from '@/lib/room/describe-faults';
 import { type Actor, actorOf, sessionCookie } from './actor';
 import { problem } from './problem';
 import { readJson } from './read-json';
+import { refuseForeign } from './refuse-foreign';
 
 /** What a use case answers: the value, and what the protocol needs to know of it. */
 export interface Answer<T> {
@@ -20,7 +22,8 @@ export interface Answer<T> {
 }
 
 interface RouteSpec<P extends z.ZodType, B extends z.ZodType, A extends z.ZodType> {
-  readonly permission: Permission;
+  /** `null`: any member may. */
+  readonly permission: Permission | null;
   readonly params?: P;
   readonly body?: B;
   /** Bytes; 512 kB unless said. */
@@ -39,8 +42,6 @@ type Context = { params: Promise<Record<string, string>> };
 
 const DEFAULT_LIMIT = 512_000;
 
-export const toEtag = (version: number): string => `"v${version}"`;
-
 function expectedVersion(request: Request): number {
   const given = request.headers.get('if-match');
   if (!given)
@@ -48,22 +49,10 @@ function expectedVersion(request: Request): number {
       'precondition_required',
       'Send If-Match with the ETag you loaded. Nothing was changed.',
     );
-  const version = /^"v(\d{1,15})"$/.exec(given.trim())?.[1];
-  if (!version)
+  const version = versionOf(given);
+  if (version === null)
     throw new AppError('malformed', 'If-Match must be an ETag as it was given out. Nothing was changed.');
-  return Number(version);
-}
-
-/** Requests that change something must come from our own pages: a foreign site's form is refused. */
-function refuseForeign(request: Request): void {
-  const site = request.headers.get('sec-fetch-site');
-  const origin = request.headers.get('origin');
-  const host =
-    request.headers.get('x-forwarded-host') ?? request.headers.get('host') ?? new URL(request.url).host;
-  const foreign = site
-    ? !['same-origin', 'none'].includes(site)
-    : origin !== null && new URL(origin).host !== host;
-  if (foreign) throw new AppError('forbidden', 'This request came from another site. Nothing was changed.');
+  return version;
 }
 
 const cookieOf = (request: Request, name: string): string | undefined =>
@@ -81,7 +70,7 @@ function check<S extends z.ZodType>(schema: S, value: unknown, words: string): z
 
 function respond({ status = 200, version, download, type }: Answer<unknown>, value: unknown): Response {
   const headers: Record<string, string> = { 'cache-control': 'no-store' };
-  if (version !== undefined) headers.etag = toEtag(version);
+  if (version !== undefined) headers.etag = etagOf(version);
   if (download) headers['content-disposition'] = `attachment; filename="${download}"`;
   if (status === 204) return new Response(null, { status, headers });
   if (type) return new Response(String(value), { status, headers: { ...headers, 'content-type': type } });
@@ -100,7 +89,7 @@ export const route =
     try {
       const actor = await actorOf(cookieOf(request, sessionCookie()));
       if (!actor) throw new AppError('unauthenticated', 'You are not signed in, or your session has ended.');
-      if (!can(actor.role, spec.permission))
+      if (spec.permission && !can(actor.role, spec.permission))
         throw new AppError('forbidden', `As ${actor.role} you cannot do this. Nothing was changed.`);
       if (request.method !== 'GET') refuseForeign(request);
       // An address that no id can have is an address of nothing.

@@ -3,6 +3,7 @@ import { eq } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
 import { users } from '@/db/schema';
 import { AppError } from '@/lib/errors';
+import { etagOf } from '@/lib/room/api/etag';
 
 /** The refusal of a save over a version that is no longer the newest; says who was first. */
 export async function staleSave(
@@ -20,7 +21,7 @@ export async function staleSave(
       : `This ${what} has changed while you were working on it. Your changes are still here and not saved.`,
     [],
     {
-      etag: `"v${held?.version ?? 0}"`,
+      etag: etagOf(held?.version ?? 0),
       savedBy: user?.name ?? null,
       savedAt: held?.updatedAt.toISOString() ?? null,
     },
