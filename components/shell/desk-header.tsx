@@ -3,6 +3,7 @@
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import type { ReactNode } from 'react';
+import type { RoomSummary } from '@/lib/room/api/resources';
 import { Mark } from './mark';
 import { UserMenu } from './user-menu';
 
@@ -98,3 +99,12 @@ export const roomTabs = (roomId: string): Tab[] => [
   { label: 'Floor plan', href: `/rooms/${roomId}/floor-plan` },
   { label: 'Stops & dose', href: `/rooms/${roomId}/stops` },
 ];
+
+export const roomCrumbs = (room: RoomSummary | undefined): Crumb[] =>
+  room
+    ? [
+        { label: room.site.name, href: '/sites' },
+        ...(room.area ? [{ label: room.area }] : []),
+        { label: room.name },
+      ]
+    : [{ label: 'Sites and rooms', href: '/sites' }, { label: '…' }];

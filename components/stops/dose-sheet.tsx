@@ -13,7 +13,7 @@ import { boundsOf } from '@/lib/drawing/viewport';
 import { addStop, moveStop, turnStop } from '@/lib/editor/stop-set-actions';
 import type { FloorPlan, PlanPoint, StopSet } from '@/lib/room';
 import type { SurfaceChoice } from '@/workers/protocol';
-import type { StopsTool } from './set-editor';
+import type { StopsTool } from './stops-tools';
 
 /** Stops snap to this grid: what a crew can read off a tape. */
 const GRID = 0.05;

@@ -14,7 +14,7 @@ import { stopProblems } from '@/lib/room/check-stops';
 import type { SurfaceChoice } from '@/workers/protocol';
 import { Caution, ModelLimits } from './caution';
 import { GapList } from './gap-list';
-import type { SetEditorProps } from './set-editor';
+import type { SetEditorProps } from './set-editor-props';
 import { SetSettings } from './set-settings';
 import { StopDetails } from './stop-details';
 import { StopTable } from './stop-table';

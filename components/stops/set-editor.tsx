@@ -1,61 +1,32 @@
 'use client';
 
-import { MousePointer2, Redo2, Ruler, Undo2, Zap } from 'lucide-react';
+import { Redo2, Undo2 } from 'lucide-react';
 import { useMemo, useState } from 'react';
 import { useEditing } from '@/components/hooks/edit-store';
 import { useAutosave } from '@/components/hooks/use-autosave';
 import { useDose } from '@/components/hooks/use-dose';
 import { useEditKeys } from '@/components/hooks/use-edit-keys';
 import { sheetProportion } from '@/components/sheet/proportion';
-import { DeskHeader, roomTabs } from '@/components/shell/desk-header';
+import { DeskHeader, roomCrumbs, roomTabs } from '@/components/shell/desk-header';
 import { ConflictNotice } from '@/components/ui/conflict-notice';
-import { Rail, RailAction, type RailTool } from '@/components/ui/rail';
+import { Rail, RailAction } from '@/components/ui/rail';
 import { SaveStatus } from '@/components/ui/save-status';
 import { fetchStopSet, saveStopSet } from '@/lib/client/stop-sets';
 import { moveStop, removeStop, reorderStop, setDwell, turnStop } from '@/lib/editor/stop-set-actions';
-import type { Emitters, FloorPlanDocument, PlanPoint, StopSet } from '@/lib/room';
-import type { RevisionSummary, RoomSummary, StopSetResource } from '@/lib/room/api/resources';
+import type { PlanPoint } from '@/lib/room';
 import type { SurfaceChoice } from '@/workers/protocol';
 import { DoseSheet } from './dose-sheet';
 import { KeysHelp } from './keys-help';
 import { Ledger } from './ledger';
 import { Legend } from './legend';
 import { ReadOut } from './read-out';
-import { roomCrumbs } from './stops-page';
+import type { SetEditorProps } from './set-editor-props';
+import { type StopsTool, tools } from './stops-tools';
 import { SurfacePicker } from './surface-choice';
 import { TargetLine } from './target-line';
 
-export type StopsTool = 'select' | 'stop' | 'tape';
-
-const tools: readonly (RailTool<StopsTool> & { editing: boolean })[] = [
-  {
-    value: 'select',
-    label: 'Select',
-    shortcut: 'V',
-    icon: <MousePointer2 size={18} aria-hidden />,
-    editing: false,
-  },
-  { value: 'stop', label: 'Stop', shortcut: 'S', icon: <Zap size={18} aria-hidden />, editing: true },
-  { value: 'tape', label: 'Tape', shortcut: 'T', icon: <Ruler size={18} aria-hidden />, editing: false },
-];
-
 /** Centimetres matter on the sheet, not below: the grid the dose is reckoned on. */
 const GRID_STEP = 0.05;
-
-export interface SetEditorProps {
-  room: RoomSummary;
-  document: FloorPlanDocument;
-  revision: RevisionSummary | null;
-  planVersion: number;
-  resource: StopSetResource;
-  sets: readonly { id: string; name: string; status: string }[];
-  emitters: Emitters;
-  editable: boolean;
-  mayWrite: boolean;
-  onOpen: (id: string) => Promise<void>;
-  /** Adds an empty stop set, or a copy of the one given. */
-  onAdd: (copyOf?: StopSet) => Promise<unknown>;
-}
 
 /** One stop set on the desk: the sheet in the middle, the ledger on the right, the rail on the left. */
 export function SetEditor(props: SetEditorProps) {

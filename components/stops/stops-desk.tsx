@@ -3,7 +3,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useState } from 'react';
-import { DeskHeader, roomTabs } from '@/components/shell/desk-header';
+import { DeskHeader, roomCrumbs, roomTabs } from '@/components/shell/desk-header';
 import { Button } from '@/components/ui/button';
 import { Empty } from '@/components/ui/empty';
 import { Notice } from '@/components/ui/notice';
@@ -12,7 +12,6 @@ import { queryKeys } from '@/lib/client/query-keys';
 import { addStopSet, fetchStopSet } from '@/lib/client/stop-sets';
 import type { Emitters, FloorPlanDocument, StopSet } from '@/lib/room';
 import type { RevisionSummary, RoomSummary, StopSetResource } from '@/lib/room/api/resources';
-import { roomCrumbs } from './stops-page';
 
 // The sheet is a canvas: it exists in the browser only.
 const SetEditor = dynamic(() => import('./set-editor').then((module) => module.SetEditor), { ssr: false });

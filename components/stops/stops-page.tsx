@@ -2,23 +2,13 @@
 
 import Link from 'next/link';
 import { useEmitters, useFloorPlan, useRoom, useStopSets } from '@/components/hooks/queries';
-import { type Crumb, DeskHeader, roomTabs } from '@/components/shell/desk-header';
+import { DeskHeader, roomCrumbs, roomTabs } from '@/components/shell/desk-header';
 import { useUser } from '@/components/shell/user';
 import { buttonClass } from '@/components/ui/button';
 import { Empty, Skeleton } from '@/components/ui/empty';
 import { Failure } from '@/components/ui/failure';
 import { can } from '@/lib/access/permissions';
-import type { RoomSummary } from '@/lib/room/api/resources';
 import { StopsDesk } from './stops-desk';
-
-export const roomCrumbs = (room: RoomSummary | undefined): Crumb[] =>
-  room
-    ? [
-        { label: room.site.name, href: '/sites' },
-        ...(room.area ? [{ label: room.area }] : []),
-        { label: room.name },
-      ]
-    : [{ label: 'Sites and rooms', href: '/sites' }, { label: '…' }];
 
 /** Loads what the page needs, and draws the states in which there is nothing to edit yet. */
 export function StopsPage({ roomId }: { roomId: string }) {
