@@ -1,6 +1,7 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
+import { savesAnswered } from '@/lib/client/autosave';
 import { queryKeys } from '@/lib/client/query-keys';
 import { fetchEmitters, fetchFloorPlan, fetchRoom, fetchRooms, fetchSites } from '@/lib/client/rooms';
 import { fetchStopSets } from '@/lib/client/stop-sets';
@@ -11,18 +12,18 @@ export const useRoom = (roomId: string) =>
   useQuery({ queryKey: queryKeys.room(roomId), queryFn: () => fetchRoom(roomId) });
 export const useEmitters = () => useQuery({ queryKey: queryKeys.emitters, queryFn: fetchEmitters });
 
-// What is edited is loaded afresh on each visit: an editor must start from what is saved now.
+// What is edited is loaded afresh on each visit, after the page before has saved: an editor must start from what is saved now.
 export const useFloorPlan = (roomId: string) =>
   useQuery({
     queryKey: queryKeys.floorPlan(roomId),
-    queryFn: () => fetchFloorPlan(roomId),
+    queryFn: () => savesAnswered().then(() => fetchFloorPlan(roomId)),
     gcTime: 0,
     staleTime: Number.POSITIVE_INFINITY,
   });
 export const useStopSets = (roomId: string) =>
   useQuery({
     queryKey: queryKeys.stopSets(roomId),
-    queryFn: () => fetchStopSets(roomId),
+    queryFn: () => savesAnswered().then(() => fetchStopSets(roomId)),
     gcTime: 0,
     staleTime: Number.POSITIVE_INFINITY,
   });

@@ -13,12 +13,10 @@ import { usePanning } from './use-panning';
 import { useSheetFonts } from './use-sheet-fonts';
 import { useElementSize, useViewport } from './use-viewport';
 
-/** A pointer on the sheet: where in the plan, what is under it, and the event itself. */
+/** A pointer on the sheet: where in the plan, and how it is held. */
 export interface SheetPointer {
   readonly at: PlanPoint;
-  /** Name of the drawn thing under the pointer; empty on bare paper. */
-  readonly target: Konva.Node;
-  readonly event: PointerEvent;
+  readonly event: Pick<PointerEvent, 'altKey' | 'shiftKey' | 'pointerType'>;
   /** Pixels per metre now. */
   readonly scale: number;
 }
@@ -45,6 +43,9 @@ export interface SheetStageProps {
   onInterrupt?: () => void;
   onDoubleClick?: (pointer: SheetPointer) => void;
   onPointerLeave?: () => void;
+  /** Something from beside the sheet is dragged over it, or let go on it. */
+  onDragOver?: (pointer: SheetPointer) => void;
+  onDrop?: (pointer: SheetPointer) => void;
 }
 
 /**
@@ -67,11 +68,16 @@ export function SheetStage(props: SheetStageProps) {
     return (
       at && {
         at: toPlan(viewport, [at.x, at.y]),
-        target: event.target,
         event: event.evt,
         scale: viewport.scale,
       }
     );
+  };
+  const dragged = (event: React.DragEvent<HTMLElement>): SheetPointer => {
+    const { left, top } = event.currentTarget.getBoundingClientRect();
+    const at = toPlan(viewport, [event.clientX - left, event.clientY - top]);
+    const { altKey, shiftKey } = event;
+    return { at, event: { altKey, shiftKey, pointerType: 'mouse' }, scale: viewport.scale };
   };
   const pass = <T,>(event: Konva.KonvaEventObject<PointerEvent>, to?: (pointer: SheetPointer) => T) => {
     const where = pointer(event);
@@ -79,11 +85,21 @@ export function SheetStage(props: SheetStageProps) {
   };
 
   return (
+    // biome-ignore lint/a11y/noStaticElementInteractions: the drawing; the list beside it does the same by keyboard.
     <div
       ref={frame}
       // Where the plan is on the sheet: pixels per metre and the plan's origin, for whoever points at it from outside.
       data-sheet={`${viewport.scale} ${viewport.x} ${viewport.y}`}
       className="relative h-full min-h-0 w-full touch-none overflow-hidden border border-rule bg-[#fcfbf7] shadow-sm sheet-paper"
+      onDragOver={(event) => {
+        if (!props.onDragOver) return;
+        event.preventDefault();
+        props.onDragOver(dragged(event));
+      }}
+      onDrop={(event) => {
+        event.preventDefault();
+        props.onDrop?.(dragged(event));
+      }}
       style={{ cursor: panning.moving ? 'grabbing' : panning.spaceHeld ? 'grab' : props.cursor }}
     >
       {size.width > 0 && fontsReady ? (

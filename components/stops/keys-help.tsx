@@ -1,8 +1,8 @@
 'use client';
 
-import { Dialog } from '@/components/ui/dialog';
+import { KeysDialog } from '@/components/ui/keys-dialog';
 
-const keys: readonly (readonly [string, string])[] = [
+const keys = [
   ['V  S  T', 'Select, place a stop, tape'],
   ['Arrows', 'On a stop in the ledger: move it by 5 cm, with Shift by 1 cm'],
   ['[  ]', 'On a stop in the ledger: turn it by 5°'],
@@ -12,19 +12,8 @@ const keys: readonly (readonly [string, string])[] = [
   ['Space and drag', 'Move the sheet'],
   ['Alt while dragging', 'No snapping to the 5 cm grid'],
   ['Esc', 'Let go of what is chosen'],
-];
+] as const;
 
-export function KeysHelp({ open, onOpenChange }: { open: boolean; onOpenChange: (open: boolean) => void }) {
-  return (
-    <Dialog open={open} onOpenChange={onOpenChange} title="Keys">
-      <dl className="grid grid-cols-[auto_1fr] gap-x-5 gap-y-2">
-        {keys.map(([key, does]) => (
-          <div key={key} className="contents">
-            <dt className="mono whitespace-nowrap">{key}</dt>
-            <dd>{does}</dd>
-          </div>
-        ))}
-      </dl>
-    </Dialog>
-  );
+export function KeysHelp(props: { open: boolean; onOpenChange: (open: boolean) => void }) {
+  return <KeysDialog keys={keys} {...props} />;
 }

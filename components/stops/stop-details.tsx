@@ -2,7 +2,8 @@
 
 import { Trash2 } from 'lucide-react';
 import { Button } from '@/components/ui/button';
-import { SelectField, TextField } from '@/components/ui/field';
+import { SelectField } from '@/components/ui/field';
+import { NameField } from '@/components/ui/name-field';
 import { NumberField } from '@/components/ui/number-field';
 import type { Emitters, Stop, StopSet } from '@/lib/room';
 import { DurationField } from './duration-field';
@@ -36,19 +37,7 @@ export function StopDetails({
       aria-label={`Stop ${stop.name}`}
       className="mt-3 grid grid-cols-2 gap-3 rounded border border-rule bg-desk/60 p-3"
     >
-      <TextField
-        label="Name"
-        defaultValue={stop.name}
-        key={stop.name}
-        maxLength={80}
-        disabled={!editable}
-        onBlur={(event) => {
-          const name = event.target.value.trim();
-          if (name && name !== stop.name) onRename(name);
-          else event.target.value = stop.name;
-        }}
-        onKeyDown={(event) => event.key === 'Enter' && event.currentTarget.blur()}
-      />
+      <NameField value={stop.name} disabled={!editable} onChange={onRename} />
       <DurationField label="Dwell" seconds={stop.dwell} onChange={onDwell} disabled={!editable} />
       <NumberField
         label="x"

@@ -97,3 +97,31 @@ export function SelectField({
     </Frame>
   );
 }
+
+/** A tick box with its words beside it. */
+export function CheckField({
+  label,
+  checked,
+  className = '',
+  disabled,
+  onChange,
+}: {
+  label: string;
+  checked: boolean;
+  className?: string;
+  disabled?: boolean;
+  onChange: (checked: boolean) => void;
+}) {
+  return (
+    <label className={`flex items-center gap-2 ${className}`}>
+      <input
+        type="checkbox"
+        className="size-4.5 accent-link"
+        checked={checked}
+        disabled={disabled}
+        onChange={(event) => onChange(event.target.checked)}
+      />
+      {label}
+    </label>
+  );
+}

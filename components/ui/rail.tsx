@@ -18,7 +18,8 @@ export function Rail<T extends string>({
   children,
 }: {
   tools: readonly RailTool<T>[];
-  value: T;
+  /** `null` while the hand holds something that is no tool. */
+  value: T | null;
   onChange: (tool: T) => void;
   children?: ReactNode;
 }) {

@@ -17,6 +17,13 @@ export interface SaveStanding {
  */
 export type Save<T> = (value: T, etag: string) => Promise<{ etag: string }>;
 
+const underWay = new Set<Promise<unknown>>();
+
+/** Resolves when every save that is under way has been answered: what is loaded after it is not older. */
+export async function savesAnswered(): Promise<void> {
+  await Promise.allSettled(underWay);
+}
+
 /**
  * Keeps one value saved: waits for a pause in editing, sends one request at a time and always the newest
  * value. A refusal stops and says so; a broken line is tried again until it holds. Nothing is dropped: the
@@ -65,10 +72,14 @@ export class Autosaver<T> {
   saveNow(over?: { etag: string }): Promise<boolean> {
     if (over) this.etag = over.etag;
     clearTimeout(this.timer);
-    this.running ??= this.run().finally(() => {
+    if (this.running) return this.running;
+    const running = this.run().finally(() => {
       this.running = null;
+      underWay.delete(running);
     });
-    return this.running;
+    this.running = running;
+    underWay.add(running);
+    return running;
   }
 
   /** Takes `value` at version `etag` as what is saved, after the person chose the other version. */

@@ -1,4 +1,4 @@
-import type { Furniture } from './schema/floor-plan';
+import type { Furniture, Part } from './schema/floor-plan';
 import type { PlanPoint } from './schema/primitives';
 import { inPlan } from './to-scene';
 
@@ -16,7 +16,7 @@ export interface PieceSize {
   readonly top: number;
 }
 
-export function pieceSize(piece: Pick<Furniture, 'parts'>): PieceSize {
+export function pieceSize(piece: { readonly parts: readonly Part[] }): PieceSize {
   const corners = piece.parts.flatMap((part) => part.footprint);
   const xs = corners.map(([x]) => x);
   const ys = corners.map(([, y]) => y);
