@@ -39,6 +39,12 @@ const FIRST_VIEW: PlanPoint[] = [
   [8, 6],
 ];
 
+/** What the sheet shows when it shows all: the room and the watch points outside it. */
+const extentOf = (document: FloorPlanDocument | null): readonly PlanPoint[] =>
+  document
+    ? [...document.floorPlan.outline, ...document.floorPlan.watchPoints.map((point) => point.at)]
+    : FIRST_VIEW;
+
 const asRoomFile = (room: RoomSummary, { ceiling, floorPlan }: FloorPlanDocument): RoomFile => ({
   format: 'leeside-room',
   version: 1,
@@ -76,10 +82,9 @@ export function PlanEditor({
   });
 
   // While the hand pulls, the sheet keeps still: what it fits to is the plan before the pull.
-  const outline = document?.floorPlan.outline;
-  const [settled, setSettled] = useState(outline);
-  if (!dragging && settled !== outline) setSettled(outline);
-  const bounds = useMemo(() => boundsOf(settled ?? FIRST_VIEW), [settled]);
+  const [settled, setSettled] = useState(document);
+  if (!dragging && settled !== document) setSettled(document);
+  const extent = useMemo(() => extentOf(settled), [settled]);
 
   const take = (outcome: Outcome, mark?: string): boolean => {
     if (isRefused(outcome)) {
@@ -117,6 +122,11 @@ export function PlanEditor({
     },
   });
 
+  /** Before there is a room there is nothing but the room to draw. */
+  const usable = (value: PlanTool): boolean => {
+    const editing = planTools.find((it) => it.value === value)?.editing;
+    return editing ? editable && (document !== null || value === 'room') : true;
+  };
   const pickTool = (next: PlanTool) => {
     draw.cancel();
     setPlacing(null);
@@ -176,8 +186,8 @@ export function PlanEditor({
       if (!step) return false;
       act((value) => nudgeThing(value, selected, step), `nudge ${selected.id}`);
     } else {
-      const next = planTools.find((it) => it.shortcut.toLowerCase() === low && (editable || !it.editing));
-      if (!next || (!document && next.value !== 'room' && next.value !== 'tape')) return false;
+      const next = planTools.find((it) => it.shortcut.toLowerCase() === low && usable(it.value));
+      if (!next) return false;
       pickTool(next.value);
     }
     return true;
@@ -196,7 +206,7 @@ export function PlanEditor({
       />
       <div className="flex min-h-0 flex-1 max-lg:flex-col">
         <Rail
-          tools={planTools.filter((it) => editable || !it.editing)}
+          tools={planTools.filter((it) => usable(it.value))}
           value={placing ? null : tool}
           onChange={pickTool}
         >
@@ -218,7 +228,7 @@ export function PlanEditor({
           ) : null}
         </Rail>
         <main className="flex min-w-0 flex-1 flex-col gap-2.5 p-3 sm:px-5">
-          <div className="relative min-h-0 flex-1 sheet-frame" style={sheetProportion(settled ?? FIRST_VIEW)}>
+          <div className="relative min-h-0 flex-1 sheet-frame" style={sheetProportion(extent)}>
             <PlanSheet
               document={document}
               tool={tool}
@@ -227,7 +237,7 @@ export function PlanEditor({
               selected={selected}
               editable={editable}
               problems={problems}
-              bounds={bounds}
+              bounds={boundsOf(extent)}
               titleBlock={[
                 { label: 'Room', value: room.name },
                 {

@@ -5,7 +5,7 @@ import { rulerStep, type Size, type Viewport } from '@/lib/drawing/viewport';
 import { ink } from './ink';
 
 /** Width of the strip that a ruler stands in, pixels. */
-export const RULER_PX = 30;
+export const RULER_PX = 38;
 
 /** Rulers in metres along the sheet's top and left edges; they follow zoom and pan. Screen pixels. */
 export function Rulers({ viewport, size }: { viewport: Viewport; size: Size }) {

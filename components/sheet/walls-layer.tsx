@@ -22,6 +22,7 @@ export function WallsLayer({
     const runs = wallRuns(plan);
     return plan.openings.map((opening) => openingShape(opening, runs)).filter((shape) => shape !== null);
   }, [plan]);
+  const chosen = selectedId ? wallRuns(plan).find((run) => run.id === selectedId) : undefined;
   return (
     <Group listening={false}>
       <Shape
@@ -42,6 +43,14 @@ export function WallsLayer({
       {slabs.map((slab, i) => (
         <Line key={plan.innerWalls[i].id} points={slab.flat()} closed fill={ink.wall} />
       ))}
+      {chosen ? (
+        <Line
+          points={[...chosen.a, ...chosen.b]}
+          stroke={ink.link}
+          strokeWidth={5}
+          strokeScaleEnabled={false}
+        />
+      ) : null}
       {openings.map((shape) => (
         <OpeningMark key={shape.opening.id} shape={shape} selected={shape.opening.id === selectedId} />
       ))}

@@ -99,7 +99,8 @@ const PARALLEL = 0.02;
 
 /**
  * Where a piece goes when its middle is pulled to `at`: flush with up to two walls that its sides run along and
- * are near to, and on the grid along what is left.
+ * are near to, and on the grid along what is left. A piece pulled through a wall stops at it as long as its own
+ * middle is on this side.
  */
 export function snapPiece(
   piece: Furniture,
@@ -118,7 +119,9 @@ export function snapPiece(
         const gap = Math.min(...reached.map(({ t }) => facing * (t - offset)));
         const beside = reached.some(({ s }) => s > 0) && reached.some(({ s }) => s < run.length);
         const turned = Math.min(...[0, 1].map((i) => alignment(corners[i], corners[i + 1], run)));
-        return { run, offset, facing, gap, fits: beside && turned < PARALLEL && Math.abs(gap) < reach };
+        const before = facing * (againstWall(run, start).t - offset) >= 0;
+        const near = Math.abs(gap) < reach || (gap < 0 && before);
+        return { run, offset, facing, gap, fits: beside && turned < PARALLEL && near };
       }),
     )
     .filter(({ fits }) => fits)
