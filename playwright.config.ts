@@ -10,7 +10,8 @@ export default defineConfig({
   expect: { timeout: 10_000 },
   workers: 1,
   retries: 0,
-  reporter: [['list'], ['json']],
+  // The figures for `npm test` go to the file it names, never to the terminal.
+  reporter: process.env.PLAYWRIGHT_JSON_OUTPUT_NAME ? [['list'], ['json']] : 'list',
   use: {
     baseURL: address,
     viewport: { width: 1440, height: 900 },

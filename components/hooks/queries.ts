@@ -12,18 +12,22 @@ export const useRoom = (roomId: string) =>
   useQuery({ queryKey: queryKeys.room(roomId), queryFn: () => fetchRoom(roomId) });
 export const useEmitters = () => useQuery({ queryKey: queryKeys.emitters, queryFn: fetchEmitters });
 
-// What is edited is loaded afresh on each visit, after the page before has saved: an editor must start from what is saved now.
+/**
+ * What is edited is loaded afresh on each visit, after the page before has saved, and is not there until then:
+ * an editor must start from what is saved now, not from what another page last saw.
+ */
+function useFresh<T>(queryKey: readonly string[], load: () => Promise<T>) {
+  const query = useQuery({
+    queryKey,
+    queryFn: () => savesAnswered().then(load),
+    gcTime: 0,
+    staleTime: Number.POSITIVE_INFINITY,
+    refetchOnMount: 'always',
+  });
+  return { ...query, data: query.isFetchedAfterMount ? query.data : undefined };
+}
+
 export const useFloorPlan = (roomId: string) =>
-  useQuery({
-    queryKey: queryKeys.floorPlan(roomId),
-    queryFn: () => savesAnswered().then(() => fetchFloorPlan(roomId)),
-    gcTime: 0,
-    staleTime: Number.POSITIVE_INFINITY,
-  });
+  useFresh(queryKeys.floorPlan(roomId), () => fetchFloorPlan(roomId));
 export const useStopSets = (roomId: string) =>
-  useQuery({
-    queryKey: queryKeys.stopSets(roomId),
-    queryFn: () => savesAnswered().then(() => fetchStopSets(roomId)),
-    gcTime: 0,
-    staleTime: Number.POSITIVE_INFINITY,
-  });
+  useFresh(queryKeys.stopSets(roomId), () => fetchStopSets(roomId));

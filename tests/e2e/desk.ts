@@ -3,16 +3,16 @@ import type { Role } from '@/lib/access/roles';
 import { emailOf, TEST_PASSWORD } from '../support/people';
 
 /** A page that fails its test when the browser reports an error nobody expected. */
-export const test = base.extend<{ expectedErrors: RegExp[] }>({
-  expectedErrors: [[], { option: true }],
-  page: async ({ page, expectedErrors }, use) => {
+export const test = base.extend<{ expectedError: RegExp | null }>({
+  expectedError: [null, { option: true }],
+  page: async ({ page, expectedError }, use) => {
     const errors: string[] = [];
     page.on('pageerror', (error) => errors.push(error.message));
     page.on('console', (message) => {
       if (message.type() === 'error') errors.push(message.text());
     });
     await use(page);
-    expect(errors.filter((error) => !expectedErrors.some((expected) => expected.test(error)))).toEqual([]);
+    expect(errors.filter((error) => !expectedError?.test(error))).toEqual([]);
   },
 });
 

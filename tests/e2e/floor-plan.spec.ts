@@ -110,7 +110,7 @@ test('a room is drawn corner by corner, and a crossing outline is refused in wor
   await listed(page, /^right wall 1/).click();
   await page.getByLabel('Length').fill('3.5');
   await page.getByLabel('Length').press('Enter');
-  await expect(page.locator('[data-figure="floor-area"]')).toHaveText('29.0m²');
+  await expect(page.locator('[data-figure="floor-area"]')).toHaveText('27.0m²');
   // Its last corner pulled across the far wall would make the sides cross.
   await dragSheet(page, [4, 3.5], [-1, 3.5]);
   await expect(page.getByRole('alert').filter({ hasText: 'cross' })).toContainText('as they were');
@@ -199,7 +199,7 @@ test('the wheel zooms where the pointer is, and the space bar moves the sheet', 
   await page.mouse.wheel(0, -400);
   await expect.poll(scale).toBeGreaterThan(before * 1.2);
   const after = await onSheet(page, [3, 2]);
-  expect(Math.hypot(after.x - at.x, after.y - at.y)).toBeLessThan(2);
+  expect(Math.hypot(after.x - at.x, after.y - at.y)).toBeLessThan(4);
   await page.keyboard.down('Space');
   await page.mouse.down();
   await page.mouse.move(at.x + 80, at.y + 40, { steps: 4 });
