@@ -5,7 +5,7 @@ import type { SheetPointer } from '@/components/sheet/sheet-stage';
 import type { Gesture } from '@/lib/editor/gestures/gesture';
 import { moveThing } from '@/lib/editor/gestures/move-thing';
 import { pullHandle } from '@/lib/editor/gestures/pull-handle';
-import { handleAt, handlesOf, thingAt } from '@/lib/editor/hit-test';
+import { handleAt, handlesOf, thingAt, touchPointAt } from '@/lib/editor/hit-test';
 import type { Outcome } from '@/lib/editor/outcome';
 import type { Guide, SnapReach } from '@/lib/editor/snapping';
 import type { FloorPlanDocument, PlanPoint } from '@/lib/room';
@@ -44,12 +44,19 @@ export function useSelectHand({
   onPull: (outcome: Outcome, mark: string) => void;
   onEnd: () => void;
 }) {
-  const pressed = useRef<{ at: PlanPoint; gesture: Gesture | null; dragging: boolean } | null>(null);
+  const pressed = useRef<{
+    at: PlanPoint;
+    gesture: Gesture | null;
+    dragging: boolean;
+    /** What the press chooses if it turns out to be a click. */
+    click: PlanRef | null;
+  } | null>(null);
   const [guides, setGuides] = useState<readonly Guide[]>([]);
   const [active, setActive] = useState(false);
 
   const stop = () => {
     if (pressed.current?.dragging) onEnd();
+    else if (pressed.current?.click) onSelect(pressed.current.click);
     pressed.current = null;
     setGuides([]);
     setActive(false);
@@ -68,10 +75,18 @@ export function useSelectHand({
           ? handleAt(handlesOf(document, selected, 1 / pointer.scale), pointer.at, reach)
           : null;
       if (handle) {
-        pressed.current = { at: pointer.at, gesture: pullHandle(document, handle), dragging: false };
+        pressed.current = {
+          at: pointer.at,
+          gesture: pullHandle(document, handle),
+          dragging: false,
+          click: null,
+        };
         return;
       }
-      const ref = thingAt(document, pointer.at, reach);
+      // A touch point that is chosen already is taken itself; a click on one of a chosen piece chooses it.
+      const own = touchPointAt(document, pointer.at, reach, () => true);
+      const ref = own && sameRef(own, selected) ? own : thingAt(document, pointer.at, reach);
+      const again = ref !== null && sameRef(ref, selected);
       onSelect(ref);
       if (!ref) return 'pan';
       const mayMove = editable && (ref.kind !== 'outline-wall' || sameRef(ref, selected));
@@ -79,6 +94,7 @@ export function useSelectHand({
         at: pointer.at,
         gesture: mayMove ? moveThing(document, ref, pointer.at) : null,
         dragging: false,
+        click: again && ref.kind === 'furniture' ? own : null,
       };
     },
     move: (pointer: SheetPointer) => {

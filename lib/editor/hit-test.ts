@@ -115,11 +115,27 @@ export function wallAt(runs: readonly WallRun[], at: PlanPoint, reach: number): 
   return best?.run ?? null;
 }
 
-/** What is under a point: small things before large ones, furniture before walls. `reach` in metres. */
+/** The touch point under a point; those that come with furniture only when `ofPiece` says so. */
+export function touchPointAt(
+  { floorPlan }: FloorPlanDocument,
+  at: PlanPoint,
+  reach: number,
+  ofPiece: (pieceId: string) => boolean,
+): PlanRef | null {
+  const spot = placedTouchPoints(floorPlan).find(
+    (one) => near(one.at, at, reach) && (one.pieceId === null || ofPiece(one.pieceId)),
+  );
+  return spot ? { kind: 'touch-point', id: spot.point.id } : null;
+}
+
+/**
+ * What is under a point: small things before large ones, furniture before walls. `reach` in metres. Touch points
+ * that come with a piece are part of it here, or a piece could not be taken by its middle.
+ */
 export function thingAt(document: FloorPlanDocument, at: PlanPoint, reach: number): PlanRef | null {
   const { floorPlan } = document;
-  const touch = placedTouchPoints(document.floorPlan).find((spot) => near(spot.at, at, reach));
-  if (touch) return { kind: 'touch-point', id: touch.point.id };
+  const touch = touchPointAt(document, at, reach, () => false);
+  if (touch) return touch;
   const watch = floorPlan.watchPoints.find((spot) => near(spot.at, at, reach));
   if (watch) return { kind: 'watch-point', id: watch.id };
   const runs = wallRuns(floorPlan);

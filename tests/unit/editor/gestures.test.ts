@@ -3,7 +3,7 @@ import { addPiece } from '@/lib/editor/furniture-actions';
 import type { Gesture, Pull } from '@/lib/editor/gestures/gesture';
 import { moveThing } from '@/lib/editor/gestures/move-thing';
 import { pullHandle } from '@/lib/editor/gestures/pull-handle';
-import { handlesOf, thingAt } from '@/lib/editor/hit-test';
+import { handlesOf, thingAt, touchPointAt } from '@/lib/editor/hit-test';
 import { addInnerWall } from '@/lib/editor/inner-wall-actions';
 import { addOpening } from '@/lib/editor/opening-actions';
 import { placedFromShelf } from '@/lib/editor/place-piece';
@@ -151,7 +151,9 @@ describe('what is under the hand', () => {
     plan = done(addOpening(plan, 'd', 'door', 'outline:0', 3));
     expect(thingAt(plan, [3, 2], 0.05)).toEqual({ kind: 'furniture', id: 'f' });
     expect(thingAt(plan, [4.2, 2.5], 0.05)).toEqual({ kind: 'furniture', id: 'large' });
-    expect(thingAt(plan, [3.5, 2], 0.05)).toEqual({ kind: 'touch-point', id: 'f-t' });
+    // A piece's own touch point does not keep the hand from the piece.
+    expect(thingAt(plan, [3.49, 2], 0.05)).toEqual({ kind: 'furniture', id: 'f' });
+    expect(touchPointAt(plan, [3.49, 2], 0.05, () => true)).toEqual({ kind: 'touch-point', id: 'f-t' });
     expect(thingAt(plan, [3, -0.05], 0.05)).toEqual({ kind: 'opening', id: 'd' });
     expect(thingAt(plan, [1, -0.05], 0.05)).toEqual({ kind: 'outline-wall', id: 'outline:0' });
     expect(thingAt(plan, [1, 3], 0.05)).toBeNull();
