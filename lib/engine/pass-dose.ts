@@ -47,7 +47,13 @@ export function passDoseAt(prepared: PreparedScene, pass: Pass, receiver: Receiv
   return passLegDosesAt(prepared, pass, receiver).reduce((sum, dose) => sum + dose, 0);
 }
 
-export function legDoseAt(tracer: Tracer, leg: PassLeg, receiver: Receiver): number {
+/** Dose (J/m²) of one leg at a receiver, off by at most the share `relative` of it. */
+export function legDoseAt(
+  tracer: Tracer,
+  leg: PassLeg,
+  receiver: Receiver,
+  relative: number = RELATIVE,
+): number {
   const { x, y, vx, vy, seconds } = leg;
   if (seconds === 0) return 0;
   const [px, py, pz] = receiver.p;
@@ -61,7 +67,7 @@ export function legDoseAt(tracer: Tracer, leg: PassLeg, receiver: Receiver): num
       return readTubes(tracer, tubes, x + tau * vx, y + tau * vy, receiver);
     };
     const breaks = legBreaks(tracer.scene, { tube, vx, vy, px, py, pz });
-    dose += seconds * integrate(at, 0, 1, breaks, RELATIVE);
+    dose += seconds * integrate(at, 0, 1, breaks, relative);
   }
   return dose;
 }

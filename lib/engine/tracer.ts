@@ -93,7 +93,7 @@ export function traceTube(
 }
 
 /** How far beside a tube a cell that touches it is read (m): a tube is about this thick, and a map must not fail on it. */
-const BESIDE = 1e-3;
+export const BESIDE = 1e-3;
 
 /** Irradiance (W/m²) of a map cell, facing up. */
 export function traceCell(tracer: Tracer, tube: PlacedTube, x: number, y: number, z: number): number {

@@ -71,7 +71,7 @@ test('from no room to a dose map without the gap, saved, found again and handed 
 
   await signOut(page);
   await signIn(page, 'planner');
-  await page.getByRole('link', { name: 'Side room 3.05' }).click();
+  await page.getByRole('link', { name: 'Side room 3.05', exact: true }).click();
   await doseSettled(page);
   expect(await page.locator('[data-figure]').allTextContents()).toEqual(figures);
 
@@ -138,9 +138,9 @@ test('furniture stops at walls, is pulled, turned, sized, copied and deleted, an
   await page.getByLabel('Turn').press('Enter');
   await expect(listed(page, /^Locker 0\.60 × 0\.45/)).toBeVisible();
   await page.getByRole('button', { name: 'Duplicate' }).click();
-  await expect(listed(page, /^Locker 2/)).toBeVisible();
+  await expect(listed(page, /^Locker 2 /)).toBeVisible();
   await page.getByRole('button', { name: 'Delete' }).click();
-  await expect(listed(page, /^Locker 2/)).toHaveCount(0);
+  await expect(listed(page, /^Locker 2 /)).toHaveCount(0);
   // Typed out of the room: kept, marked and said where.
   await listed(page, /^Locker /).click();
   await page.getByLabel('x (m)').fill('5.9');
