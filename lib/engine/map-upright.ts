@@ -1,4 +1,4 @@
-import { EDGE, MERGE } from '@/lib/geometry/degenerate';
+import { EDGE, MERGE, SKIN } from '@/lib/geometry/degenerate';
 import type { PlacedTube } from './placed-tube';
 import { RowShadows } from './row-shadows';
 import { castSilhouettes } from './silhouettes';
@@ -18,22 +18,44 @@ export function addUprightTube(
   surface: GridSurface,
   out: Float32Array,
 ): void {
-  const { columns, rows, z } = surface;
+  const { columns, rows, z, step, originX, originY } = surface;
+  const dx0 = originX + 0.5 * step - tube.ax;
   const silhouettes = castSilhouettes(tracer.scene, surface, tube.ax, tube.ay);
   const shadows = new RowShadows(columns, tracer.scene);
   for (let j = 0; j < rows; j++) {
+    const dy = originY + (j + 0.5) * step - tube.ay;
+    const front = frontOf(tube, dx0, dy, step, columns);
     if (typeof z === 'number') {
-      lightRun(tracer, tube, surface, silhouettes, shadows, j, 0, columns, z, out);
+      lightRun(tracer, tube, surface, silhouettes, shadows, j, front.first, front.end, z, out);
       continue;
     }
     const start = j * columns;
-    for (let i = 0; i < columns; ) {
+    for (let i = front.first; i < front.end; ) {
       let end = i + 1;
-      while (end < columns && z[start + end] === z[start + i]) end++;
+      while (end < front.end && z[start + end] === z[start + i]) end++;
       lightRun(tracer, tube, surface, silhouettes, shadows, j, i, end, z[start + i], out);
       i = end;
     }
   }
+}
+
+/** The columns of a row in front of a backed tube: (p − q)·m > 0, linear along the row. All of them for a bare one. */
+function frontOf(
+  { backed, mx, my }: PlacedTube,
+  dx0: number,
+  dy: number,
+  step: number,
+  columns: number,
+): { first: number; end: number } {
+  if (!backed) return { first: 0, end: columns };
+  const ahead = (i: number) => (dx0 + i * step) * mx + dy * my > SKIN;
+  if (ahead(0) === ahead(columns - 1)) return { first: 0, end: ahead(0) ? columns : 0 };
+  // Rounding may put the crossing a column off: the test itself decides.
+  let crossing = Math.floor((-(dy * my) / mx - dx0) / step);
+  const before = ahead(0);
+  while (crossing > 0 && ahead(crossing) !== before) crossing--;
+  while (crossing < columns - 1 && ahead(crossing + 1) === before) crossing++;
+  return before ? { first: 0, end: crossing + 1 } : { first: crossing + 1, end: columns };
 }
 
 /** Lights the columns first ≤ i < end of row j, all at one height. */
