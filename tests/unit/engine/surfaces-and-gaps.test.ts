@@ -206,7 +206,7 @@ describe('the cause of a gap', () => {
     ['facing away', { solids: [screen], walls: wall }, at(4, 1, 2.5), 300],
     ['walled off', { solids: [screen], walls: wall }, at(4, 1), 3000],
     ['hidden', { solids: [screen], walls: [] }, at(3, 1), 3000],
-    ['partly hidden', { solids: [{ ...screen, top: 0.7 }], walls: [] }, at(3, 1), 120],
+    ['partly hidden', { solids: [{ ...screen, top: 0.7 }], walls: [] }, at(3, 1), 150],
     ['short', { solids: [], walls: [] }, at(6, 1), 1],
   ] as const)('%s', (expected, scene, spot, dwell) => {
     expect(cause(scene, spot, dwell)).toBe(expected);
