@@ -27,7 +27,8 @@ export interface Ask {
   /** A body that is sent as it is, in place of `body`. */
   readonly text?: string | Uint8Array<ArrayBuffer>;
   readonly etag?: string;
-  readonly headers?: Readonly<Record<string, string>>;
+  /** `null` takes a header away that our own page sends. */
+  readonly headers?: Readonly<Record<string, string | null>>;
 }
 
 export interface Answer {
@@ -82,16 +83,17 @@ export function requestOf(
 ): Request {
   const [method, route] = deed.split(' ');
   const content = text ?? (body === undefined ? undefined : JSON.stringify(body));
+  const sent: Record<string, string | null> = {
+    ...(method === 'GET' ? {} : { origin: ORIGIN, 'sec-fetch-site': 'same-origin' }),
+    ...(content === undefined ? {} : { 'content-type': 'application/json' }),
+    ...(etag === undefined ? {} : { 'if-match': etag }),
+    ...(session === undefined ? {} : { cookie: `theme=dark; next-auth.session-token=${session}` }),
+    ...headers,
+  };
   return new Request(`${ORIGIN}${addressOf(route, params)}`, {
     method,
     body: content,
-    headers: {
-      ...(method === 'GET' ? {} : { origin: ORIGIN, 'sec-fetch-site': 'same-origin' }),
-      ...(content === undefined ? {} : { 'content-type': 'application/json' }),
-      ...(etag === undefined ? {} : { 'if-match': etag }),
-      ...(session === undefined ? {} : { cookie: `theme=dark; next-auth.session-token=${session}` }),
-      ...headers,
-    },
+    headers: Object.entries(sent).filter((header): header is [string, string] => header[1] !== null),
   });
 }
 
