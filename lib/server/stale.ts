@@ -4,6 +4,26 @@ import type { Tx } from '@/db/client';
 import { users } from '@/db/schema';
 import { AppError } from '@/lib/errors';
 import { etagOf } from '@/lib/room/api/etag';
+import type { Actor } from './actor';
+import { sameJson } from './same-json';
+
+interface Held {
+  readonly version: number;
+  readonly document: unknown;
+  readonly updatedBy: string;
+}
+
+/** Is this the save that is held already? Its answer was lost on the way and the browser sends it again. */
+export const isRepeated = (
+  held: Held | undefined,
+  actor: Actor,
+  document: unknown,
+  expected: number,
+): boolean =>
+  held !== undefined &&
+  held.version === expected + 1 &&
+  held.updatedBy === actor.userId &&
+  sameJson(held.document, document);
 
 /** The refusal of a save over a version that is no longer the newest; says who was first. */
 export async function staleSave(

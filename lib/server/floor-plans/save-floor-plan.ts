@@ -8,7 +8,7 @@ import type { Actor } from '../actor';
 import { audit } from '../audit';
 import { refuseFaults } from '../refuse-faults';
 import { ownRoom } from '../rooms/own-room';
-import { staleSave } from '../stale';
+import { isRepeated, staleSave } from '../stale';
 
 /** Saves the working plan over version `expected`; answers the new version, or who was first. */
 export function saveFloorPlan(
@@ -22,6 +22,7 @@ export function saveFloorPlan(
     await ownRoom(tx, actor, roomId);
     refuseFaults(planReferenceFaults(document.floorPlan, 'floorPlan.'), 'floor plan');
     const [held] = await tx.select().from(floorPlans).where(eq(floorPlans.roomId, roomId));
+    if (isRepeated(held, actor, document, expected)) return expected + 1;
     if ((held?.version ?? 0) !== expected) throw await staleSave(tx, 'floor plan', held);
     const version = expected + 1;
     const row = { document, version, updatedBy: actor.userId, updatedAt: new Date() };

@@ -1,5 +1,4 @@
 import 'server-only';
-import { isDeepStrictEqual } from 'node:util';
 import { and, eq, inArray } from 'drizzle-orm';
 import type { Database, Tx } from '@/db/client';
 import { emitters, floorPlans, rooms, sites, stopSets } from '@/db/schema';
@@ -12,6 +11,7 @@ import { audit } from '../audit';
 import { listEmitters } from '../emitters/list-emitters';
 import { newId } from '../new-id';
 import { refuseFaults } from '../refuse-faults';
+import { sameJson } from '../same-json';
 
 async function siteCalled(tx: Tx, actor: Actor, name: string): Promise<string> {
   const [found] = await tx
@@ -47,9 +47,9 @@ async function bringEmitters(tx: Tx, actor: Actor, wanted: Emitters): Promise<Ma
   const held = await listEmitters(tx, actor);
   const names = new Map<string, string>();
   for (const [key, emitter] of Object.entries(wanted)) {
-    const same = isDeepStrictEqual(held[key], emitter)
+    const same = sameJson(held[key], emitter)
       ? key
-      : Object.keys(held).find((other) => isDeepStrictEqual(held[other], emitter));
+      : Object.keys(held).find((other) => sameJson(held[other], emitter));
     if (same !== undefined) {
       names.set(key, same);
       continue;

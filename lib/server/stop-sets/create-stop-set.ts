@@ -10,6 +10,7 @@ import { audit } from '../audit';
 import { listEmitters } from '../emitters/list-emitters';
 import { refuseFaults } from '../refuse-faults';
 import { ownRoom } from '../rooms/own-room';
+import { sameJson } from '../same-json';
 
 /** Adds a draft. The browser makes the id, so a repeated request adds nothing twice. */
 export function createStopSet(
@@ -21,7 +22,8 @@ export function createStopSet(
   return write(async (tx) => {
     await ownRoom(tx, actor, roomId);
     const [held] = await tx.select().from(stopSets).where(eq(stopSets.id, set.id));
-    if (held?.roomId === roomId) return { version: held.version, added: false };
+    if (held?.roomId === roomId && sameJson(held.document, set))
+      return { version: held.version, added: false };
     if (held)
       throw new AppError('conflict', 'This id is taken. Nothing was changed.', [
         { path: 'id', message: 'Make another id' },

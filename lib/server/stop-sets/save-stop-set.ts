@@ -9,7 +9,7 @@ import type { Actor } from '../actor';
 import { audit } from '../audit';
 import { listEmitters } from '../emitters/list-emitters';
 import { refuseFaults } from '../refuse-faults';
-import { staleSave } from '../stale';
+import { isRepeated, staleSave } from '../stale';
 import { ownStopSet, refuseUnlessDraft } from './own-stop-set';
 
 /** Saves a draft over version `expected`; answers the new version, or who was first. */
@@ -27,6 +27,7 @@ export function saveStopSet(
         { path: 'id', message: `Must be ${stopSetId}` },
       ]);
     refuseUnlessDraft(held);
+    if (isRepeated(held, actor, set, expected)) return held.version;
     if (held.version !== expected) throw await staleSave(tx, 'stop set', held);
     refuseFaults(setReferenceFaults(set, await listEmitters(tx, actor)), 'stop set');
     const version = expected + 1;
