@@ -16,7 +16,7 @@ export function problem(error: unknown): Response {
       code,
       detail:
         known?.message ??
-        'Nothing was changed. Try again; if it happens again, tell whoever runs Leeside for you.',
+        'Your last change may not be saved. Try again; if it happens again, tell whoever runs Leeside for you.',
       ...(known?.faults.length ? { faults: known.faults } : {}),
     },
     { status, headers: { 'content-type': 'application/problem+json', 'cache-control': 'no-store' } },

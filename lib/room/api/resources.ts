@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { emitterKey, emitterSchema } from '../schema/emitter';
 import { floorPlanDocumentSchema } from '../schema/floor-plan';
-import { id, name } from '../schema/primitives';
+import { id, name, words } from '../schema/primitives';
 import { stopSetSchema, stopSetStatusSchema } from '../schema/stop-set';
 
 /** What the API takes and answers, beyond the things themselves. */
@@ -43,7 +43,7 @@ export const revisionSummarySchema = z.object({
 });
 export const revisionSchema = revisionSummarySchema.extend({ document: floorPlanDocumentSchema });
 export const revisionListSchema = z.object({ revisions: z.array(revisionSummarySchema) });
-export const newRevisionSchema = z.strictObject({ note: z.string().trim().max(200).default('') });
+export const newRevisionSchema = z.strictObject({ note: words(200).default('') });
 
 export const floorPlanResourceSchema = z.object({
   /** `null` until the room is drawn. */

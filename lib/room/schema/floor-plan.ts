@@ -27,7 +27,7 @@ export const partSchema = z
 export const furnitureSchema = z.strictObject({
   id,
   name,
-  kind: z.string().trim().min(1).max(40),
+  kind: name.max(40, 'Keep the kind to 40 characters'),
   at: point,
   turn: degrees,
   parts: z.array(partSchema).min(1, 'A piece of furniture needs at least one part').max(30),

@@ -21,6 +21,20 @@ export const id = z
   .string()
   .regex(/^[A-Za-z0-9_-]{1,40}$/, 'An id is 1 to 40 letters, digits, hyphens or underscores');
 
-export const name = z.string().trim().min(1, 'Give it a name').max(80, 'Keep the name under 80 characters');
+/** One line a person can read. A control character would end it in a database or a file, half a character in neither be itself. */
+export const name = z
+  .string()
+  .trim()
+  .min(1, 'Give it a name')
+  .max(80, 'Keep the name to 80 characters')
+  .regex(/^[^\p{Cc}\p{Cs}]*$/u, 'A name cannot hold control characters or half characters');
+
+/** Words of several lines, or none. */
+export const words = (most: number) =>
+  z
+    .string()
+    .trim()
+    .max(most, `Keep it to ${most} characters`)
+    .regex(/^(?:[^\p{Cc}\p{Cs}]|[\n\r\t])*$/u, 'Text cannot hold control characters or half characters');
 
 export type PlanPoint = z.infer<typeof point>;

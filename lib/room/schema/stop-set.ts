@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { emitterKey } from './emitter';
-import { degrees, id, name, point } from './primitives';
+import { degrees, id, name, point, words } from './primitives';
 
 /** Dwell is limited to four hours: longer is a slip, and a lamp that long wants a person's second thought. */
 export const MAX_DWELL_SECONDS = 4 * 3600;
@@ -31,7 +31,7 @@ export const targetSchema = z.strictObject({
   name,
   /** J/m². */
   dose: z.number().positive('A dose target must be more than 0').max(1_000_000),
-  source: z.string().trim().max(400),
+  source: words(400),
 });
 
 export const stopSetSchema = z.strictObject({

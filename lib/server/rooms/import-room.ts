@@ -34,7 +34,11 @@ async function freeRoomName(tx: Tx, siteId: string, name: string): Promise<strin
   );
   for (let number = 1; ; number++) {
     const suffix = number === 1 ? '' : ` (${number})`;
-    const candidate = `${name.slice(0, 80 - suffix.length)}${suffix}`;
+    // Cut between characters, not through one.
+    const candidate = `${name
+      .slice(0, 80 - suffix.length)
+      .replace(/\p{Cs}$/u, '')
+      .trimEnd()}${suffix}`;
     if (!taken.has(candidate)) return candidate;
   }
 }
