@@ -7,7 +7,10 @@ export const permissions = {
     does: 'See sites, rooms, floor plans and stop sets',
   },
   'sites:write': { roles: ['owner'], does: 'Add sites' },
-  'rooms:write': { roles: ['owner', 'planner'], does: 'Add, import, rename and archive rooms' },
+  'rooms:write': {
+    roles: ['owner', 'planner'],
+    does: 'Add, rename and archive rooms; import them, with the sites and emitters that a file brings',
+  },
   'floor-plans:write': { roles: ['owner', 'planner'], does: 'Draw floor plans and save revisions' },
   'stop-sets:write': { roles: ['owner', 'planner'], does: 'Place stops and edit draft stop sets' },
   'emitters:read': { roles: ['owner', 'planner', 'reviewer', 'crew'], does: 'See the emitters' },
