@@ -1,6 +1,5 @@
 import * as Comlink from 'comlink';
-import type { GridSurface, Placement } from '@/lib/engine/types';
-import type { DoseWorker, GapsReport, RoomJob, TimedPlacement } from './protocol';
+import type { DoseWorker, GapsReport, LampField, LampJob, LitPlan, MapSurface, RoomJob } from './protocol';
 
 /** A newer request took this one's place. Not a failure: whoever asked has asked again. */
 export class Superseded extends Error {
@@ -27,7 +26,7 @@ interface Seat {
 const MOST_WORKERS = 4;
 
 /**
- * A bounded pool of dose workers. Jobs have a slot (one a stop): within a slot they run one after the
+ * A bounded pool of dose workers. Jobs have a slot (one a stop or pass): within a slot they run one after the
  * other, and a waiting job gives way to a newer one, so a dragged stop always shows its newest finished
  * map and nothing piles up. A worker that dies fails its job with words and is replaced.
  */
@@ -42,21 +41,16 @@ export class DosePool {
     this.seats = Array.from({ length: size }, () => this.seat());
   }
 
-  surface(room: RoomJob): Promise<GridSurface> {
-    return this.ask('surface', room, (worker) => worker.load(room));
+  surface(room: RoomJob): Promise<MapSurface> {
+    return this.ask('surface', room, async (worker) => worker.load(room));
   }
 
-  irradiance(slot: string, room: RoomJob, placement: Placement): Promise<Float32Array> {
-    return this.ask(`map ${slot}`, room, (worker) => worker.irradiance(room.key, placement));
+  light(slot: string, room: RoomJob, lamp: LampJob): Promise<LampField> {
+    return this.ask(`map ${slot}`, room, (worker) => worker.light(room.key, lamp));
   }
 
-  gaps(
-    room: RoomJob,
-    stops: readonly TimedPlacement[],
-    dose: Float32Array,
-    target: number,
-  ): Promise<GapsReport> {
-    return this.ask('gaps', room, (worker) => worker.gaps(room.key, stops, dose, target));
+  gaps(room: RoomJob, lit: LitPlan, dose: Float32Array, target: number): Promise<GapsReport> {
+    return this.ask('gaps', room, (worker) => worker.gaps(room.key, lit, dose, target));
   }
 
   close(): void {

@@ -1,19 +1,21 @@
 import { addDose, coverage } from '@/lib/engine';
-import type { GridSurface } from '@/lib/engine/types';
 import {
   type Emitters,
-  emitterOf,
-  type FloorPlan,
+  type FloorPlanDocument,
+  type Lamp,
+  lampsOf,
+  litPlanOf,
+  placedTouchPoints,
   requiredDose,
   type StopSet,
-  toPlacement,
   toScene,
+  toSpot,
 } from '@/lib/room';
 import { type DosePool, Superseded } from '@/workers/pool';
-import type { GapsReport, RoomJob, SurfaceChoice, TimedPlacement } from '@/workers/protocol';
+import type { GapsReport, LampField, MapSurface, RoomJob, SurfaceChoice } from '@/workers/protocol';
 
 export interface DoseInput {
-  readonly plan: FloorPlan;
+  readonly document: FloorPlanDocument;
   readonly set: StopSet;
   readonly emitters: Emitters;
   readonly surface: SurfaceChoice;
@@ -21,15 +23,26 @@ export interface DoseInput {
   readonly step: number;
 }
 
+/** A touch point's name, and what it gets. */
+export interface TouchDose {
+  readonly id: string;
+  readonly name: string;
+  /** J/m² */
+  readonly dose: number;
+  /** Dose ÷ target. */
+  readonly ratio: number;
+}
+
 export interface DosePicture {
-  readonly surface: GridSurface;
+  readonly surface: MapSurface;
   /** Dose ÷ target, a cell each. */
   readonly ratio: Float32Array;
   /** J/m² a cell. */
   readonly dose: Float32Array;
-  /** W/m² a cell, by stop id: the shares under the pointer. */
-  readonly maps: ReadonlyMap<string, Float32Array>;
+  /** What each stop and pass gives, by id, with its weight: the shares under the pointer. */
+  readonly shares: readonly { readonly lamp: Lamp; readonly map: Float32Array }[];
   readonly coverage: ReturnType<typeof coverage>;
+  readonly touchPoints: readonly TouchDose[];
 }
 
 export interface DoseView {
@@ -44,29 +57,30 @@ export interface DoseView {
   readonly settledFor: StopSet | null;
 }
 
-interface StopMap {
-  readonly placementKey: string;
-  readonly map: Float32Array;
+export const nothingYet: DoseView = {
+  picture: null,
+  gaps: null,
+  pending: 1,
+  asked: 1,
+  failure: null,
+  settledFor: null,
+};
+
+interface HeldField {
+  readonly key: string;
+  readonly field: LampField;
 }
 
 /**
- * Keeps the dose picture of what is on the sheet: one map a stop, asked of the workers only when that stop
- * moved; a dwell only re-adds. The picture is renewed as maps come in, the gaps once nothing is pending.
+ * Keeps the dose picture of what is on the sheet: one field a stop or pass, asked of the workers only when that one
+ * moved; a dwell or a speed only re-adds. The picture is renewed as fields come in, the gaps once nothing is pending.
  */
 export class DoseSession {
-  private view: DoseView = {
-    picture: null,
-    gaps: null,
-    pending: 0,
-    asked: 0,
-    failure: null,
-    settledFor: null,
-  };
+  private view: DoseView = nothingYet;
   private input: DoseInput | null = null;
-  private planOfRoom: FloorPlan | null = null;
   private room: RoomJob | null = null;
-  private surface: GridSurface | null = null;
-  private maps = new Map<string, StopMap>();
+  private surface: MapSurface | null = null;
+  private fields = new Map<string, HeldField>();
   private inFlight = new Map<string, string>();
   private rooms = 0;
   private readonly listeners = new Set<() => void>();
@@ -89,91 +103,99 @@ export class DoseSession {
   show(input: DoseInput): void {
     const before = this.input;
     this.input = input;
-    if (
-      this.planOfRoom !== input.plan ||
-      before?.step !== input.step ||
-      JSON.stringify(before.surface) !== JSON.stringify(input.surface)
-    ) {
-      void this.openRoom(input);
-    } else if (this.surface) {
-      this.renew();
-    }
+    const sameRoom =
+      before?.document === input.document &&
+      before.step === input.step &&
+      JSON.stringify(before.surface) === JSON.stringify(input.surface);
+    if (!sameRoom) void this.openRoom(input);
+    else if (this.surface) this.renew();
   }
 
-  private async openRoom({ plan, surface, step }: DoseInput): Promise<void> {
-    const { scene, outline, voids } = toScene(plan);
+  private async openRoom({ document, surface, step }: DoseInput): Promise<void> {
+    const { scene, outline, voids } = toScene(document.floorPlan);
+    const spots = placedTouchPoints(document.floorPlan).map(toSpot);
     this.rooms += 1;
-    const room: RoomJob = { key: `room-${this.rooms}`, scene, outline, voids, surface, step };
-    this.planOfRoom = plan;
+    const key = `room-${this.rooms}`;
+    const room: RoomJob = { key, scene, outline, voids, ceiling: document.ceiling, spots, surface, step };
     this.room = room;
     this.surface = null;
-    this.maps = new Map();
+    this.fields = new Map();
     this.inFlight = new Map();
     this.say({ pending: 1, asked: 1, failure: null, settledFor: null });
     try {
-      const grid = await this.pool.surface(room);
+      const cells = await this.pool.surface(room);
       if (this.room !== room) return;
-      this.surface = grid;
+      this.surface = cells;
+      // What was shown belongs to other cells.
+      this.say({ picture: null, gaps: null });
       this.renew();
     } catch (error) {
       this.fail(error, room);
     }
   }
 
-  /** Asks for the maps that are missing or old, and shows what there is. */
+  /** Asks for the fields that are missing or old, and shows what there is. */
   private renew(): void {
     const { input, room } = this;
     if (!input || !room || !this.surface) return;
-    const alive = new Set(input.set.stops.map((stop) => stop.id));
-    for (const id of this.maps.keys()) if (!alive.has(id)) this.maps.delete(id);
+    const lamps = lampsOf(input.set, input.emitters);
+    const alive = new Set(lamps.map(({ id }) => id));
+    for (const id of this.fields.keys()) if (!alive.has(id)) this.fields.delete(id);
     for (const id of this.inFlight.keys()) if (!alive.has(id)) this.inFlight.delete(id);
-    for (const stop of input.set.stops) {
-      const emitter = emitterOf(input.set, stop, input.emitters);
-      if (!emitter) continue;
-      const placement = toPlacement(stop, emitter);
-      const key = JSON.stringify(placement);
-      if (this.maps.get(stop.id)?.placementKey === key || this.inFlight.get(stop.id) === key) continue;
-      this.inFlight.set(stop.id, key);
+    for (const { id, job } of lamps) {
+      const key = JSON.stringify(job);
+      if (this.fields.get(id)?.key === key || this.inFlight.get(id) === key) continue;
+      this.inFlight.set(id, key);
       this.pool
-        .irradiance(stop.id, room, placement)
-        .then((map) => this.receive(room, stop.id, key, map))
+        .light(id, room, job)
+        .then((field) => this.receive(room, id, key, field))
         .catch((error) => this.fail(error, room));
     }
     this.repaint();
   }
 
-  private receive(room: RoomJob, stopId: string, placementKey: string, map: Float32Array): void {
-    if (this.room !== room || !this.inFlight.has(stopId)) return;
-    this.maps.set(stopId, { placementKey, map });
-    if (this.inFlight.get(stopId) === placementKey) this.inFlight.delete(stopId);
+  private receive(room: RoomJob, id: string, key: string, field: LampField): void {
+    if (this.room !== room || !this.inFlight.has(id)) return;
+    this.fields.set(id, { key, field });
+    if (this.inFlight.get(id) === key) this.inFlight.delete(id);
     this.repaint();
   }
 
-  /** Adds the maps up. No ray is cast here. */
+  /** Adds the fields up. No ray is cast here. */
   private repaint(): void {
     const { input, surface, room } = this;
     if (!input || !surface || !room) return;
     const target = requiredDose(input.set);
-    const dose = new Float32Array(surface.columns * surface.rows);
-    for (const stop of input.set.stops) {
-      const held = this.maps.get(stop.id);
-      if (held) addDose(dose, held.map, stop.dwell);
-    }
-    const ratio = dose.map((value) => value / target);
     const pending = this.inFlight.size;
-    const first = !this.view.picture;
     // A half-filled picture would show gaps that are only not there yet.
-    if (first && pending > 0) {
-      this.say({ pending, asked: input.set.stops.length });
+    if (!this.view.picture && pending > 0) {
+      this.say({ pending, asked: Math.max(pending, this.view.asked) });
       return;
     }
+    const dose = new Float32Array(surface.mask.length);
+    const touched = new Float64Array(room.spots.length);
+    const shares = lampsOf(input.set, input.emitters).flatMap((lamp) => {
+      const held = this.fields.get(lamp.id);
+      if (!held) return [];
+      addDose(dose, held.field.map, lamp.weight);
+      held.field.spots.forEach((value, i) => {
+        touched[i] += value * lamp.weight;
+      });
+      return [{ lamp, map: held.field.map }];
+    });
     this.say({
       picture: {
         surface,
         dose,
-        ratio,
-        maps: new Map([...this.maps].map(([id, held]) => [id, held.map])),
+        shares,
+        ratio: dose.map((value) => value / target),
         coverage: coverage(surface, dose, target),
+        touchPoints: placedTouchPoints(input.document.floorPlan).map(({ point, pieceName }, i) => ({
+          id: point.id,
+          name: pieceName ? `${pieceName}: ${point.name}` : point.name,
+          dose: touched[i],
+          ratio: touched[i] / target,
+        })),
       },
       pending,
       asked: Math.max(pending, this.view.asked),
@@ -184,12 +206,8 @@ export class DoseSession {
   private async explain(room: RoomJob, dose: Float32Array, target: number): Promise<void> {
     const { input } = this;
     if (!input) return;
-    const stops: TimedPlacement[] = input.set.stops.flatMap((stop) => {
-      const emitter = emitterOf(input.set, stop, input.emitters);
-      return emitter ? [{ placement: toPlacement(stop, emitter), dwell: stop.dwell }] : [];
-    });
     try {
-      const gaps = await this.pool.gaps(room, stops, dose, target);
+      const gaps = await this.pool.gaps(room, litPlanOf(input.set, input.emitters), dose, target);
       if (this.room === room && this.view.picture?.dose === dose)
         this.say({ gaps, asked: 0, settledFor: input.set });
     } catch (error) {

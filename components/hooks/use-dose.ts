@@ -2,16 +2,8 @@
 
 import { useEffect, useState, useSyncExternalStore } from 'react';
 import { DosePool, startDoseThread } from '@/workers/pool';
-import { type DoseInput, DoseSession, type DoseView } from './dose-session';
+import { type DoseInput, DoseSession, type DoseView, nothingYet } from './dose-session';
 
-const nothingYet: DoseView = {
-  picture: null,
-  gaps: null,
-  pending: 1,
-  asked: 1,
-  failure: null,
-  settledFor: null,
-};
 const noSubscription = () => () => {};
 
 /** The dose picture of `input`, kept up to date by workers that live as long as the component. */
@@ -24,10 +16,10 @@ export function useDose(input: DoseInput): DoseView {
     return () => opened.close();
   }, []);
 
-  const { plan, set, emitters, surface, step } = input;
+  const { document, set, emitters, surface, step } = input;
   useEffect(() => {
-    session?.show({ plan, set, emitters, surface, step });
-  }, [session, plan, set, emitters, surface, step]);
+    session?.show({ document, set, emitters, surface, step });
+  }, [session, document, set, emitters, surface, step]);
 
   return useSyncExternalStore(
     session?.subscribe ?? noSubscription,

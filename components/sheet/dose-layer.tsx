@@ -3,14 +3,17 @@
 import type Konva from 'konva';
 import { useMemo } from 'react';
 import { Group, Label, Shape, Tag, Text } from 'react-konva';
-import type { DosePicture } from '@/components/hooks/dose-session';
 import { doseImage, regionEdges } from '@/lib/drawing/dose-image';
 import { finerGrid } from '@/lib/drawing/finer-grid';
 import { hatchLines } from '@/lib/drawing/hatch';
+import type { GridSurface } from '@/lib/engine';
 import type { GapsReport } from '@/workers/protocol';
 import { useSheetScale } from './sheet-scale';
 
 const UMBER = '#5a2f08';
+/** Smaller gaps than these are in the ledger only: numbers must not cover the drawing. */
+const MOST_MARKS = 40;
+const MOST_FACE_MARKS = 12;
 
 function toCanvas(columns: number, rows: number, pixels: Uint8ClampedArray<ArrayBuffer>): HTMLCanvasElement {
   const canvas = document.createElement('canvas');
@@ -29,14 +32,11 @@ function strokeSegments(context: Konva.Context, segments: readonly number[]) {
 }
 
 /** The dose map on the sheet: colour steps, hatching and a drawn edge round what is under target. Metres. */
-export function DoseLayer({ picture }: { picture: DosePicture }) {
+export function DoseLayer({ grid, ratio: coarse }: { grid: GridSurface; ratio: Float32Array }) {
   const pxPerMetre = useSheetScale();
   // A drawn cell is about two pixels: no stairs where the eye would see them, no work where it would not.
-  const parts = Math.max(1, Math.min(4, Math.round((picture.surface.step * pxPerMetre) / 2)));
-  const { surface, ratio } = useMemo(
-    () => finerGrid(picture.surface, picture.ratio, parts),
-    [picture.surface, picture.ratio, parts],
-  );
+  const parts = Math.max(1, Math.min(4, Math.round((grid.step * pxPerMetre) / 2)));
+  const { surface, ratio } = useMemo(() => finerGrid(grid, coarse, parts), [grid, coarse, parts]);
   const canvas = useMemo(
     () => toCanvas(surface.columns, surface.rows, doseImage(surface, ratio)),
     [surface, ratio],
@@ -83,22 +83,22 @@ export function DoseLayer({ picture }: { picture: DosePicture }) {
   );
 }
 
-/** The numbers of the gaps, and the whole of the chosen one outlined. */
+/** The numbers of the gaps, and the whole of the chosen one outlined where the surface lies in plan. */
 export function GapMarks({
-  picture,
+  grid,
   report,
   chosen,
   onChoose,
 }: {
-  picture: DosePicture;
+  grid: GridSurface | null;
   report: GapsReport;
   chosen: number | null;
   onChoose: (gap: number) => void;
 }) {
   const pxPerMetre = useSheetScale();
   const outline = useMemo(
-    () => (chosen === null ? [] : regionEdges(picture.surface, (cell) => report.labels[cell] === chosen)),
-    [picture.surface, report, chosen],
+    () => (chosen === null || !grid ? [] : regionEdges(grid, (cell) => report.labels[cell] === chosen)),
+    [grid, report, chosen],
   );
   const px = 1 / pxPerMetre;
   return (
@@ -115,35 +115,37 @@ export function GapMarks({
           }}
         />
       ) : null}
-      {report.gaps.slice(0, 40).map((gap) => (
-        <Label
-          key={gap.number}
-          name={`gap G${gap.number}`}
-          x={gap.at[0]}
-          y={gap.at[1]}
-          scaleX={px}
-          scaleY={px}
-          offsetX={13}
-          offsetY={10}
-          onClick={() => onChoose(gap.number)}
-          onTap={() => onChoose(gap.number)}
-        >
-          <Tag
-            fill={chosen === gap.number ? UMBER : '#fcfbf7'}
-            stroke={UMBER}
-            strokeWidth={1.5}
-            cornerRadius={3}
-          />
-          <Text
-            text={`G${gap.number}`}
-            fontFamily="Barlow Condensed"
-            fontStyle="600"
-            fontSize={13}
-            padding={4}
-            fill={chosen === gap.number ? '#fcfbf7' : UMBER}
-          />
-        </Label>
-      ))}
+      {report.gaps
+        .filter(({ number }) => number <= (grid ? MOST_MARKS : MOST_FACE_MARKS) || number === chosen)
+        .map((gap) => (
+          <Label
+            key={gap.number}
+            name={`gap G${gap.number}`}
+            x={gap.at[0]}
+            y={gap.at[1]}
+            scaleX={px}
+            scaleY={px}
+            offsetX={13}
+            offsetY={10}
+            onClick={() => onChoose(gap.number)}
+            onTap={() => onChoose(gap.number)}
+          >
+            <Tag
+              fill={chosen === gap.number ? UMBER : '#fcfbf7'}
+              stroke={UMBER}
+              strokeWidth={1.5}
+              cornerRadius={3}
+            />
+            <Text
+              text={`G${gap.number}`}
+              fontFamily="Barlow Condensed"
+              fontStyle="600"
+              fontSize={13}
+              padding={4}
+              fill={chosen === gap.number ? '#fcfbf7' : UMBER}
+            />
+          </Label>
+        ))}
     </Group>
   );
 }

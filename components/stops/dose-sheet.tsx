@@ -4,25 +4,33 @@ import { useMemo, useState } from 'react';
 import type { DoseView } from '@/components/hooks/dose-session';
 import { DoseLayer, GapMarks } from '@/components/sheet/dose-layer';
 import { FurnitureLayer } from '@/components/sheet/furniture-layer';
+import { PassesLayer } from '@/components/sheet/passes-layer';
 import { SheetStage } from '@/components/sheet/sheet-stage';
+import { SidesLayer } from '@/components/sheet/sides-layer';
 import { StopsLayer } from '@/components/sheet/stops-layer';
 import { TapeOverlay } from '@/components/sheet/tape-overlay';
+import { TouchDoseLayer } from '@/components/sheet/touch-dose-layer';
 import { WallsLayer } from '@/components/sheet/walls-layer';
 import { newId } from '@/lib/client/new-id';
 import { boundsOf } from '@/lib/drawing/viewport';
+import { movePassPoint } from '@/lib/editor/pass-actions';
+import { onGrid, straighten } from '@/lib/editor/snapping';
 import { addStop, moveStop, turnStop } from '@/lib/editor/stop-set-actions';
-import type { FloorPlan, PlanPoint, StopSet } from '@/lib/room';
+import { distanceToSegment } from '@/lib/geometry/polygon';
+import { type FloorPlan, type PlanPoint, placedTouchPoints, type StopSet } from '@/lib/room';
 import type { SurfaceChoice } from '@/workers/protocol';
+import type { Chosen } from './chosen';
+import type { PathDraft } from './path-draft';
+import { SheetNotes } from './sheet-notes';
 import type { StopsTool } from './stops-tools';
 
-/** Stops snap to this grid: what a crew can read off a tape. */
-const GRID = 0.05;
-const snap = ([x, y]: PlanPoint): [number, number] => [
-  Number((Math.round(x / GRID) * GRID).toFixed(3)),
-  Number((Math.round(y / GRID) * GRID).toFixed(3)),
-];
+/** Stops and paths snap to what a crew can read off a tape. */
+const snap = ([x, y]: PlanPoint): PlanPoint => [Number(onGrid(x).toFixed(3)), Number(onGrid(y).toFixed(3))];
 
-/** The sheet of the stops page: dose map, room, stops and gaps, and what the hand does on them. */
+/** Pixels from an edge within which a click means that face. */
+const FACE_REACH_PX = 12;
+
+/** The sheet of the stops page: dose map, room, stops, passes and gaps, and what the hand does on them. */
 export function DoseSheet({
   plan,
   set,
@@ -30,10 +38,11 @@ export function DoseSheet({
   surface,
   tool,
   editable,
-  selectedStopId,
+  chosen,
   chosenGap,
+  path,
   titleBlock,
-  onSelectStop,
+  onChoose,
   onChooseGap,
   onEdit,
   onGestureEnd,
@@ -45,37 +54,84 @@ export function DoseSheet({
   surface: SurfaceChoice;
   tool: StopsTool;
   editable: boolean;
-  selectedStopId: string | null;
+  chosen: Chosen | null;
   chosenGap: number | null;
+  path: PathDraft;
   titleBlock: readonly { label: string; value: string }[];
-  onSelectStop: (id: string | null) => void;
+  onChoose: (chosen: Chosen | null) => void;
   onChooseGap: (gap: number | null) => void;
   onEdit: (action: (set: StopSet) => StopSet, gesture?: string) => void;
   onGestureEnd: () => void;
   onPointer: (at: PlanPoint | null) => void;
 }) {
   const bounds = useMemo(() => boundsOf(plan.outline), [plan]);
+  const spots = useMemo(() => placedTouchPoints(plan), [plan]);
   const [tape, setTape] = useState<{ from: PlanPoint; to: PlanPoint; held: boolean } | null>(null);
+  const lit = set.stops.length + set.passes.length > 0;
+  const { picture } = dose;
+  const grid = picture?.surface.kind === 'grid' ? picture.surface.grid : null;
+  const strips = picture?.surface.kind === 'sides' ? picture.surface.strips : null;
+  const ratioOf = useMemo(
+    () => new Map(lit ? picture?.touchPoints.map(({ id, ratio }) => [id, ratio]) : []),
+    [picture, lit],
+  );
+  const chosenId = (kind: Chosen['kind']) => (chosen?.kind === kind ? chosen.id : null);
+  const choose = (kind: 'stop' | 'pass', id: string) => {
+    if (tool !== 'tape') onChoose({ kind, id });
+  };
+
+  /** The face whose edge is under the pointer. */
+  const faceAt = ([x, y]: PlanPoint, reach: number): number | null => {
+    let best: { strip: number; off: number } | null = null;
+    strips?.forEach((strip, k) => {
+      // A click in front of a face means it, not the one behind it.
+      const off = distanceToSegment(x - strip.normal[0] * 0.01, y - strip.normal[1] * 0.01, strip.a, strip.b);
+      const front = (x - strip.a[0]) * strip.normal[0] + (y - strip.a[1]) * strip.normal[1] > -0.001;
+      if (front && off < (best?.off ?? reach)) best = { strip: k, off };
+    });
+    return (best as { strip: number } | null)?.strip ?? null;
+  };
+
   return (
     <div className="relative h-full">
       <SheetStage
         bounds={bounds}
-        label={`Dose map of the room with ${set.stops.length} stops. The ledger lists the stops and the gaps.`}
+        label={`Dose map of the room with ${set.stops.length} stops and ${set.passes.length} passes. The ledger lists them, the gaps and the touch points.`}
         titleBlock={titleBlock}
         cursor={tool === 'select' ? 'default' : 'crosshair'}
-        underlay={dose.picture && set.stops.length > 0 ? <DoseLayer picture={dose.picture} /> : null}
+        underlay={grid && picture && lit ? <DoseLayer grid={grid} ratio={picture.ratio} /> : null}
         overlay={
           <>
-            {dose.picture && dose.gaps && set.stops.length > 0 ? (
-              <GapMarks picture={dose.picture} report={dose.gaps} chosen={chosenGap} onChoose={onChooseGap} />
+            {strips && picture && lit ? (
+              <SidesLayer
+                strips={strips}
+                ratio={picture.ratio}
+                chosen={chosen?.kind === 'face' ? Number(chosen.id) : null}
+              />
             ) : null}
+            {picture && dose.gaps && lit ? (
+              <GapMarks grid={grid} report={dose.gaps} chosen={chosenGap} onChoose={onChooseGap} />
+            ) : null}
+            <TouchDoseLayer spots={spots} ratioOf={ratioOf} chosen={chosenId('touch-point')} />
+            <PassesLayer
+              passes={set.passes}
+              selectedId={chosenId('pass')}
+              editable={editable && tool !== 'tape'}
+              draft={path.shown}
+              onSelect={(id) => choose('pass', id)}
+              onMovePoint={(id, index, at, free) =>
+                onEdit(
+                  (value) => movePassPoint(value, id, index, free ? at : snap(at)),
+                  `path ${id} ${index}`,
+                )
+              }
+              onMoveEnd={onGestureEnd}
+            />
             <StopsLayer
               stops={set.stops}
-              selectedId={selectedStopId}
+              selectedId={chosenId('stop')}
               editable={editable && tool !== 'tape'}
-              onSelect={(id) => {
-                if (tool !== 'tape') onSelectStop(id);
-              }}
+              onSelect={(id) => choose('stop', id)}
               onMove={(id, at, free) =>
                 onEdit((value) => moveStop(value, id, free ? at : snap(at)), `move ${id}`)
               }
@@ -86,19 +142,25 @@ export function DoseSheet({
             {tape ? <TapeOverlay from={tape.from} to={tape.to} /> : null}
           </>
         }
-        onPointerDown={({ at }) => {
+        onPointerDown={({ at, event, scale }) => {
           if (tool === 'tape') setTape({ from: at, to: at, held: true });
-          else if (tool === 'stop') {
+          else if (tool === 'pass') {
+            const last = path.points.at(-1);
+            path.add(snap(event.shiftKey && last ? straighten(last, at) : at));
+          } else if (tool === 'stop') {
             const id = newId();
             onEdit((value) => addStop(value, id, snap(at)));
-            onSelectStop(id);
+            onChoose({ kind: 'stop', id });
           } else {
-            onSelectStop(null);
+            const face = faceAt(at, FACE_REACH_PX / scale);
+            onChoose(face === null ? null : { kind: 'face', id: String(face) });
             onChooseGap(null);
           }
         }}
+        onDoubleClick={() => path.finish()}
         onPointerMove={({ at }) => {
           onPointer(at);
+          path.follow(at);
           if (tape?.held) setTape({ ...tape, to: at });
         }}
         onPointerUp={() => setTape((held) => held && { ...held, held: false })}
@@ -106,35 +168,11 @@ export function DoseSheet({
       >
         <FurnitureLayer
           furniture={plan.furniture}
-          plane={set.stops.length === 0 ? null : surface.kind === 'tops' ? 'tops' : surface.z}
+          plane={!lit || surface.kind === 'sides' ? null : surface.kind === 'tops' ? 'tops' : surface.z}
         />
         <WallsLayer plan={plan} />
       </SheetStage>
-      <SheetNotes dose={dose} empty={set.stops.length === 0} editable={editable} />
+      <SheetNotes dose={dose} empty={!lit} editable={editable} drawingPath={path.points.length > 0} />
     </div>
-  );
-}
-
-/** Progress, failure, and what to do first: over the sheet's upper edge, never in the way of the hand. */
-function SheetNotes({ dose, empty, editable }: { dose: DoseView; empty: boolean; editable: boolean }) {
-  const words = dose.failure
-    ? `The dose map stopped: ${dose.failure} The stops are safe. Move one, or reload the page.`
-    : empty
-      ? editable
-        ? 'Click the sheet where the emitter should stand: that is the first stop.'
-        : 'This stop set has no stops yet.'
-      : !dose.picture
-        ? `Reckoning the dose map: ${Math.max(0, dose.asked - dose.pending)} of ${dose.asked} stops`
-        : null;
-  if (!words) return null;
-  return (
-    <p
-      role={dose.failure ? 'alert' : 'status'}
-      className={`on-sheet pointer-events-none absolute top-10 left-1/2 w-max max-w-[85%] -translate-x-1/2 rounded border bg-[#fcfbf7] px-3 py-1.5 text-[#1e2326] ${
-        dose.failure ? 'border-[#c8452d]' : 'border-[#b9b3a5]'
-      }`}
-    >
-      {words}
-    </p>
   );
 }

@@ -9,10 +9,13 @@ const shown = 12;
 export function GapList({
   report,
   chosen,
+  placeOf,
   onChoose,
 }: {
   report: GapsReport | null;
   chosen: number | null;
+  /** Name of the upright face a gap lies on. */
+  placeOf: (strip: number) => string | undefined;
   onChoose: (gap: number | null) => void;
 }) {
   if (!report) return <p className="mt-2 text-ink-2">Appears once the dose map is there.</p>;
@@ -45,7 +48,12 @@ export function GapList({
                 </button>
               </td>
               <td className="mono py-1.5 pr-3 text-right">{gap.area.toFixed(2)} m²</td>
-              <td className="py-1.5 first-letter:uppercase">{gap.cause}</td>
+              <td className="py-1.5">
+                <span className="block first-letter:uppercase">{gap.cause}</span>
+                {gap.strip === null ? null : (
+                  <span className="block text-[13px] leading-tight text-ink-2">{placeOf(gap.strip)}</span>
+                )}
+              </td>
               <td className="mono py-1.5 text-right">{formatRatio(gap.lowestRatio)}</td>
             </tr>
           ))}

@@ -3,10 +3,11 @@
 import { KeysDialog } from '@/components/ui/keys-dialog';
 
 const keys = [
-  ['V  S  T', 'Select, place a stop, tape'],
-  ['Arrows', 'On a stop in the ledger: move it by 5 cm, with Shift by 1 cm'],
+  ['V  S  P  T', 'Select, place a stop, draw a pass, tape'],
+  ['Enter, Backspace', 'While drawing a pass: end it, take a point back'],
+  ['Arrows', 'On a stop or pass in the ledger: move it by 5 cm, with Shift by 1 cm'],
   ['[  ]', 'On a stop in the ledger: turn it by 5°'],
-  ['Delete', 'Delete the chosen stop'],
+  ['Delete', 'Delete the chosen stop or pass'],
   ['Ctrl Z, Ctrl Y', 'Undo, redo'],
   ['+  −  0', 'Zoom in, out, whole room'],
   ['Space and drag', 'Move the sheet'],

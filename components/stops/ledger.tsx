@@ -8,17 +8,24 @@ import { SelectField } from '@/components/ui/field';
 import { IconButton } from '@/components/ui/icon-button';
 import { Notice } from '@/components/ui/notice';
 import { stopSetCsvAddress } from '@/lib/client/stop-sets';
+import { changePass, movePass } from '@/lib/editor/pass-actions';
 import { moveStop, renameStop, setStopEmitter, turnStop } from '@/lib/editor/stop-set-actions';
 import { type StopSet, timesOf } from '@/lib/room';
 import { stopProblems } from '@/lib/room/check-stops';
+import { faceNames } from '@/lib/room/face-names';
 import type { SurfaceChoice } from '@/workers/protocol';
 import { Caution, ModelLimits } from './caution';
+import type { Chosen } from './chosen';
+import { ChosenFace } from './chosen-face';
 import { GapList } from './gap-list';
+import { PassDetails } from './pass-details';
+import { PassTable } from './pass-table';
 import type { SetEditorProps } from './set-editor-props';
 import { SetSettings } from './set-settings';
 import { StopDetails } from './stop-details';
 import { StopTable } from './stop-table';
 import { surfaceName } from './surface-choice';
+import { TouchPointList } from './touch-point-list';
 import { Verdict } from './verdict';
 
 /** Every number of the stop set, beside the sheet. */
@@ -31,12 +38,12 @@ export function Ledger({
   set,
   dose,
   surface,
-  selectedStopId,
+  chosen,
   chosenGap,
   notice,
   onOpen,
   onAdd,
-  onSelectStop,
+  onChoose,
   onChooseGap,
   onEdit,
   onNudge,
@@ -49,17 +56,17 @@ export function Ledger({
   set: StopSet;
   dose: DoseView;
   surface: SurfaceChoice;
-  selectedStopId: string | null;
+  chosen: Chosen | null;
   chosenGap: number | null;
   notice: ReactNode;
-  onSelectStop: (id: string | null) => void;
+  onChoose: (chosen: Chosen | null) => void;
   onChooseGap: (gap: number | null) => void;
   onEdit: (action: (set: StopSet) => StopSet, gesture?: string) => void;
   onNudge: (id: string, dx: number, dy: number) => void;
   onTurnBy: (id: string, by: number) => void;
   onDwell: (id: string, seconds: number) => void;
   onReorder: (id: string, by: number) => void;
-  onRemove: (id: string) => void;
+  onRemove: (thing: Chosen) => void;
   onSaveNow: () => Promise<boolean>;
 }) {
   const [settingsOpen, setSettingsOpen] = useState(false);
@@ -67,7 +74,11 @@ export function Ledger({
   const plan = document.floorPlan;
   const times = useMemo(() => timesOf(set, emitters), [set, emitters]);
   const problems = useMemo(() => stopProblems(set, plan, emitters), [set, plan, emitters]);
-  const stop = set.stops.find((it) => it.id === selectedStopId);
+  const stop = chosen?.kind === 'stop' ? set.stops.find((it) => it.id === chosen.id) : undefined;
+  const pass = chosen?.kind === 'pass' ? set.passes.find((it) => it.id === chosen.id) : undefined;
+  const lit = set.stops.length + set.passes.length > 0;
+  const cells = dose.picture?.surface;
+  const faces = useMemo(() => (cells?.kind === 'sides' ? faceNames(plan, cells.strips) : []), [plan, cells]);
   const settled = dose.settledFor === set;
 
   /** What is on the desk is saved first: another set, a copy or a file must not leave the newest edit behind. */
@@ -98,6 +109,7 @@ export function Ledger({
         picture={dose.picture}
         times={times}
         stops={set.stops.length}
+        passes={set.passes.length}
         surfaceName={surfaceName(surface)}
       />
       <div className="flex items-end gap-2">
@@ -149,13 +161,13 @@ export function Ledger({
           <StopTable
             set={set}
             plan={plan}
-            selectedId={selectedStopId}
+            selectedId={stop?.id ?? null}
             editable={editable}
-            onSelect={onSelectStop}
+            onSelect={(id) => onChoose(id === null ? null : { kind: 'stop', id })}
             onReorder={onReorder}
             onNudge={onNudge}
             onTurn={onTurnBy}
-            onRemove={onRemove}
+            onRemove={(id) => onRemove({ kind: 'stop', id })}
           />
         )}
         {problems.length > 0 ? (
@@ -183,21 +195,70 @@ export function Ledger({
             onTurn={(heading) => onEdit((value) => turnStop(value, stop.id, heading))}
             onDwell={(seconds) => onDwell(stop.id, seconds)}
             onEmitter={(key) => onEdit((value) => setStopEmitter(value, stop.id, key))}
-            onRemove={() => onRemove(stop.id)}
+            onRemove={() => onRemove({ kind: 'stop', id: stop.id })}
           />
         ) : null}
       </section>
+
+      {set.passes.length > 0 ? (
+        <section aria-labelledby="passes-heading">
+          <h2 id="passes-heading" className="label">
+            Passes
+          </h2>
+          <PassTable
+            set={set}
+            selectedId={pass?.id ?? null}
+            editable={editable}
+            onSelect={(id) => onChoose(id === null ? null : { kind: 'pass', id })}
+            onNudge={(id, dx, dy) => onEdit((value) => movePass(value, id, [dx, dy]), `nudge ${id}`)}
+            onRemove={(id) => onRemove({ kind: 'pass', id })}
+          />
+          {pass ? (
+            <PassDetails
+              key={pass.id}
+              pass={pass}
+              set={set}
+              emitters={emitters}
+              editable={editable}
+              onChange={(change) => onEdit((value) => changePass(value, pass.id, change))}
+              onRemove={() => onRemove({ kind: 'pass', id: pass.id })}
+            />
+          ) : null}
+        </section>
+      ) : null}
+
+      {chosen?.kind === 'face' && dose.picture ? (
+        <ChosenFace
+          plan={plan}
+          picture={dose.picture}
+          face={Number(chosen.id)}
+          onClose={() => onChoose(null)}
+        />
+      ) : null}
 
       <section aria-labelledby="gaps-heading">
         <h2 id="gaps-heading" className="label">
           Shadow gaps
         </h2>
-        {set.stops.length === 0 ? (
+        {!lit ? (
           <p className="mt-2 text-ink-2">Place a stop to see them.</p>
         ) : (
-          <GapList report={dose.gaps} chosen={chosenGap} onChoose={onChooseGap} />
+          <GapList
+            report={dose.gaps}
+            chosen={chosenGap}
+            placeOf={(strip) => faces[strip]}
+            onChoose={onChooseGap}
+          />
         )}
       </section>
+
+      {lit && dose.picture ? (
+        <TouchPointList
+          touchPoints={dose.picture.touchPoints}
+          chosen={chosen?.kind === 'touch-point' ? chosen.id : null}
+          onChoose={(id) => onChoose(id === null ? null : { kind: 'touch-point', id })}
+        />
+      ) : null}
 
       <Caution />
       <ModelLimits />
@@ -205,7 +266,7 @@ export function Ledger({
         <Button
           variant="primary"
           icon={<Download size={16} aria-hidden />}
-          disabled={set.stops.length === 0}
+          disabled={!lit}
           onClick={saved(async () => window.location.assign(stopSetCsvAddress(set.id)))}
         >
           Stop sequence (CSV)

@@ -11,14 +11,18 @@ import { DeskHeader, roomCrumbs, roomTabs } from '@/components/shell/desk-header
 import { ConflictNotice } from '@/components/ui/conflict-notice';
 import { Rail, RailAction } from '@/components/ui/rail';
 import { SaveStatus } from '@/components/ui/save-status';
+import { newId } from '@/lib/client/new-id';
 import { fetchStopSet, saveStopSet } from '@/lib/client/stop-sets';
+import { addPass, removePass } from '@/lib/editor/pass-actions';
 import { moveStop, removeStop, reorderStop, setDwell, turnStop } from '@/lib/editor/stop-set-actions';
 import type { PlanPoint } from '@/lib/room';
 import type { SurfaceChoice } from '@/workers/protocol';
+import type { Chosen } from './chosen';
 import { DoseSheet } from './dose-sheet';
 import { KeysHelp } from './keys-help';
 import { Ledger } from './ledger';
 import { Legend } from './legend';
+import { usePathDraft } from './path-draft';
 import { ReadOut } from './read-out';
 import type { SetEditorProps } from './set-editor-props';
 import { type StopsTool, tools } from './stops-tools';
@@ -27,6 +31,8 @@ import { TargetLine } from './target-line';
 
 /** Centimetres matter on the sheet, not below: the grid the dose is reckoned on. */
 const GRID_STEP = 0.05;
+/** Upright faces add up to several times the floor. */
+const SIDES_STEP = 0.1;
 
 /** One stop set on the desk: the sheet in the middle, the ledger on the right, the rail on the left. */
 export function SetEditor(props: SetEditorProps) {
@@ -35,13 +41,22 @@ export function SetEditor(props: SetEditorProps) {
   const editing = useEditing(resource.stopSet);
   const set = editing.value;
   const [tool, setTool] = useState<StopsTool>(editable && set.stops.length === 0 ? 'stop' : 'select');
-  const [stopId, setStopId] = useState<string | null>(null);
+  const [chosen, setChosen] = useState<Chosen | null>(null);
   const [gap, setGap] = useState<number | null>(null);
   const [surface, setSurface] = useState<SurfaceChoice>({ kind: 'plane', z: 0.75 });
   const [pointer, setPointer] = useState<PlanPoint | null>(null);
   const [helpOpen, setHelpOpen] = useState(false);
   const dose = useDose(
-    useMemo(() => ({ plan, set, emitters, surface, step: GRID_STEP }), [plan, set, emitters, surface]),
+    useMemo(
+      () => ({
+        document,
+        set,
+        emitters,
+        surface,
+        step: surface.kind === 'sides' ? SIDES_STEP : GRID_STEP,
+      }),
+      [document, set, emitters, surface],
+    ),
   );
   const saving = useAutosave({
     value: set,
@@ -49,27 +64,48 @@ export function SetEditor(props: SetEditorProps) {
     save: (value, etag) => saveStopSet(value, etag),
   });
 
+  const remove = ({ kind, id }: Chosen) => {
+    if (kind === 'stop') editing.edit((value) => removeStop(value, id));
+    else if (kind === 'pass') editing.edit((value) => removePass(value, id));
+    else return;
+    setChosen(null);
+  };
+  const path = usePathDraft((points) => {
+    const id = newId();
+    editing.edit((value) => addPass(value, id, points));
+    setChosen({ kind: 'pass', id });
+    setTool('select');
+  });
+  const pickTool = (next: StopsTool) => {
+    path.cancel();
+    setTool(next);
+  };
+  /** A gap on an upright face is looked at with the face unrolled. */
+  const chooseGap = (number: number | null) => {
+    setGap(number);
+    const strip = dose.gaps?.gaps.find((one) => one.number === number)?.strip ?? null;
+    if (strip !== null) setChosen({ kind: 'face', id: String(strip) });
+  };
+
   useEditKeys(editing, (event) => {
     const picked = tools.find(({ shortcut }) => shortcut.toLowerCase() === event.key.toLowerCase());
     if (event.ctrlKey || event.metaKey) return false;
-    if (picked && (editable || !picked.editing)) setTool(picked.value);
+    if (picked && (editable || !picked.editing)) pickTool(picked.value);
     else if (event.key === '?') setHelpOpen(true);
     else if (event.key === 'Escape') {
       editing.cancelGesture();
-      setStopId(null);
-      setGap(null);
-      setTool('select');
-    } else if (editable && stopId && (event.key === 'Delete' || event.key === 'Backspace')) {
-      editing.edit((value) => removeStop(value, stopId));
-      setStopId(null);
-    } else return false;
+      if (path.points.length > 0) path.cancel();
+      else {
+        setChosen(null);
+        setGap(null);
+        setTool('select');
+      }
+    } else if (event.key === 'Enter') return path.finish();
+    else if (event.key === 'Backspace' && path.takeBack()) return true;
+    else if (editable && chosen && (event.key === 'Delete' || event.key === 'Backspace')) remove(chosen);
+    else return false;
     return true;
   });
-
-  const remove = (id: string) => {
-    editing.edit((value) => removeStop(value, id));
-    setStopId(null);
-  };
 
   return (
     <div className="flex h-dvh flex-col max-lg:h-auto max-lg:min-h-dvh">
@@ -79,7 +115,7 @@ export function SetEditor(props: SetEditorProps) {
         status={editable ? <SaveStatus {...saving} /> : <span>Read only</span>}
       />
       <div className="flex min-h-0 flex-1 max-lg:flex-col">
-        <Rail tools={tools.filter((it) => editable || !it.editing)} value={tool} onChange={setTool}>
+        <Rail tools={tools.filter((it) => editable || !it.editing)} value={tool} onChange={pickTool}>
           {editable ? (
             <>
               <RailAction
@@ -99,7 +135,15 @@ export function SetEditor(props: SetEditorProps) {
         </Rail>
         <main className="flex min-w-0 flex-1 flex-col gap-2.5 p-3 sm:px-5">
           <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
-            <SurfacePicker value={surface} onChange={setSurface} />
+            <SurfacePicker
+              value={surface}
+              onChange={(next) => {
+                // Gaps and faces belong to the surface they were found on.
+                setGap(null);
+                if (chosen?.kind === 'face') setChosen(null);
+                setSurface(next);
+              }}
+            />
             <TargetLine set={set} />
           </div>
           <div className="sheet-frame min-h-0 flex-1" style={sheetProportion(plan.outline)}>
@@ -110,8 +154,9 @@ export function SetEditor(props: SetEditorProps) {
               surface={surface}
               tool={tool}
               editable={editable}
-              selectedStopId={stopId}
+              chosen={chosen}
               chosenGap={gap}
+              path={path}
               titleBlock={[
                 { label: 'Room', value: room.name },
                 {
@@ -122,15 +167,15 @@ export function SetEditor(props: SetEditorProps) {
                 },
                 { label: 'Emitter', value: emitters[set.emitter]?.name ?? set.emitter },
               ]}
-              onSelectStop={setStopId}
-              onChooseGap={setGap}
+              onChoose={setChosen}
+              onChooseGap={chooseGap}
               onEdit={editing.edit}
               onGestureEnd={editing.endGesture}
               onPointer={setPointer}
             />
           </div>
           <div className="flex min-h-[22px] flex-col gap-1.5">
-            <ReadOut picture={dose.picture} set={set} at={pointer} />
+            <ReadOut picture={dose.picture} at={pointer} />
             <Legend />
           </div>
         </main>
@@ -139,7 +184,7 @@ export function SetEditor(props: SetEditorProps) {
           set={set}
           dose={dose}
           surface={surface}
-          selectedStopId={stopId}
+          chosen={chosen}
           chosenGap={gap}
           notice={
             <ConflictNotice
@@ -155,8 +200,8 @@ export function SetEditor(props: SetEditorProps) {
               }}
             />
           }
-          onSelectStop={setStopId}
-          onChooseGap={setGap}
+          onChoose={setChosen}
+          onChooseGap={chooseGap}
           onEdit={editing.edit}
           onNudge={(id, dx, dy) =>
             editing.edit((value) => {

@@ -1,7 +1,7 @@
-import { MousePointer2, Ruler, Zap } from 'lucide-react';
+import { MousePointer2, Route, Ruler, Zap } from 'lucide-react';
 import type { RailTool } from '@/components/ui/rail';
 
-export type StopsTool = 'select' | 'stop' | 'tape';
+export type StopsTool = 'select' | 'stop' | 'pass' | 'tape';
 
 /** What the hand can do on the stops page; `editing` ones are for who may change the set. */
 export const tools: readonly (RailTool<StopsTool> & { editing: boolean })[] = [
@@ -13,5 +13,6 @@ export const tools: readonly (RailTool<StopsTool> & { editing: boolean })[] = [
     editing: false,
   },
   { value: 'stop', label: 'Stop', shortcut: 'S', icon: <Zap size={18} aria-hidden />, editing: true },
+  { value: 'pass', label: 'Pass', shortcut: 'P', icon: <Route size={18} aria-hidden />, editing: true },
   { value: 'tape', label: 'Tape', shortcut: 'T', icon: <Ruler size={18} aria-hidden />, editing: false },
 ];

@@ -14,13 +14,15 @@ const planes = [
 export const surfaceName = (choice: SurfaceChoice): string =>
   choice.kind === 'tops'
     ? 'tops and floor'
-    : choice.z === FLOOR
-      ? 'the floor'
-      : `${choice.z.toFixed(2)} m plane`;
+    : choice.kind === 'sides'
+      ? 'all upright faces'
+      : choice.z === FLOOR
+        ? 'the floor'
+        : `${choice.z.toFixed(2)} m plane`;
 
 const OWN = 'own';
 
-/** What the dose map is shown on: the floor, a plane at a height, or the top of whatever stands there. */
+/** What the dose map is shown on: the floor, a plane at a height, the top of whatever stands there, or upright faces. */
 export function SurfacePicker({
   value,
   onChange,
@@ -29,16 +31,16 @@ export function SurfacePicker({
   onChange: (choice: SurfaceChoice) => void;
 }) {
   const known = planes.find((plane) => value.kind === 'plane' && plane.z === value.z);
-  const current = value.kind === 'tops' ? 'tops' : (known?.value ?? OWN);
+  const current = value.kind === 'plane' ? (known?.value ?? OWN) : value.kind;
   return (
     <div className="flex flex-wrap items-center gap-3">
       <span className="text-sm text-ink-2">Surface</span>
       <Segmented
         label="Surface"
         value={current}
-        options={[...planes, { value: 'tops', label: 'Tops' }]}
+        options={[...planes, { value: 'tops', label: 'Tops' }, { value: 'sides', label: 'Sides' }]}
         onChange={(chosen) => {
-          if (chosen === 'tops') onChange({ kind: 'tops' });
+          if (chosen === 'tops' || chosen === 'sides') onChange({ kind: chosen });
           else onChange({ kind: 'plane', z: planes.find((plane) => plane.value === chosen)?.z ?? FLOOR });
         }}
       />

@@ -7,11 +7,13 @@ export function Verdict({
   picture,
   times,
   stops,
+  passes,
   surfaceName,
 }: {
   picture: DosePicture | null;
   times: Times;
   stops: number;
+  passes: number;
   surfaceName: string;
 }) {
   // Rounded down: 99.96 % is not "100 %" while a cell is still under target.
@@ -32,6 +34,7 @@ export function Verdict({
         </p>
         <p>
           + {formatDuration(times.moving)} moving, {stops} {stops === 1 ? 'stop' : 'stops'}
+          {passes > 0 ? `, ${passes} ${passes === 1 ? 'pass' : 'passes'}` : ''}
         </p>
       </div>
     </div>

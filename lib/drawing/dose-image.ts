@@ -27,24 +27,12 @@ const stepIndex = (ratio: number): number =>
 
 /** One RGBA pixel a cell; see-through where a cell does not count. */
 export function doseImage(
-  { columns, rows, mask }: GridSurface,
+  { columns, rows, mask }: Pick<GridSurface, 'columns' | 'rows' | 'mask'>,
   ratio: Float32Array,
 ): Uint8ClampedArray<ArrayBuffer> {
   const pixels = new Uint32Array(columns * rows);
   for (let i = 0; i < pixels.length; i++) {
     if (mask[i] === 1) pixels[i] = words[stepIndex(ratio[i])];
-  }
-  return new Uint8ClampedArray(pixels.buffer);
-}
-
-/** One opaque pixel a cell under target: the stencil that hatching is cut with. */
-export function underImage(
-  { columns, rows, mask }: GridSurface,
-  ratio: Float32Array,
-): Uint8ClampedArray<ArrayBuffer> {
-  const pixels = new Uint32Array(columns * rows);
-  for (let i = 0; i < pixels.length; i++) {
-    if (mask[i] === 1 && ratio[i] < 1) pixels[i] = 0xff000000;
   }
   return new Uint8ClampedArray(pixels.buffer);
 }

@@ -5,7 +5,7 @@ import type { GridSurface } from '@/lib/engine/types';
  * x + y is a multiple of `spacing`, cut to half a cell. Vectors, so screen, print and PDF hatch alike.
  */
 export function hatchLines(
-  { originX, originY, step, columns, rows, mask }: GridSurface,
+  { originX, originY, step, columns, rows, mask }: Omit<GridSurface, 'z'>,
   inside: (cell: number) => boolean,
   spacing: number,
 ): number[] {

@@ -32,7 +32,11 @@ export interface Coverage {
 }
 
 /** How much of a surface reaches the target (J/m²). */
-export function coverage(surface: GridSurface, dose: Float32Array | Float64Array, target: number): Coverage {
+export function coverage(
+  surface: Pick<GridSurface, 'mask'>,
+  dose: Float32Array | Float64Array,
+  target: number,
+): Coverage {
   if (!(target > 0)) throw new Error(`Target dose ${target} J/m² must be more than 0.`);
   const ratios = new Float32Array(surface.mask.length);
   let cells = 0;

@@ -66,7 +66,15 @@ function doseIn(scene: Scene, surface: GridSurface, { stops, passes = [] }: Caus
 
 /** The decision alone, for callers that have the two further doses at hand. */
 export function causesFromDoses(
-  { surface, dose, target, gaps, labels }: Omit<CausesInput, 'scene' | 'stops' | 'passes'>,
+  {
+    surface,
+    dose,
+    target,
+    gaps,
+    labels,
+  }: Omit<CausesInput, 'scene' | 'stops' | 'passes' | 'surface'> & {
+    readonly surface: Pick<GridSurface, 'mask'>;
+  },
   furnitureOut: Float32Array,
   allOut: Float32Array,
 ): CausesReport {

@@ -1,3 +1,4 @@
+export * from './lamps';
 export * from './schema/emitter';
 export * from './schema/floor-plan';
 export * from './schema/primitives';
@@ -7,3 +8,4 @@ export * from './stop-csv';
 export * from './tape';
 export * from './times';
 export * from './to-scene';
+export * from './touch-points';

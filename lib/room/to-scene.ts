@@ -1,5 +1,6 @@
 import type {
   Emitter as EngineEmitter,
+  Pass as EnginePass,
   Placement,
   Point,
   Scene,
@@ -115,6 +116,16 @@ export function toScene(plan: FloorPlan): RoomScene {
 /** Rated output × maintenance factor: what the tubes give today. */
 export const toEngineEmitter = (emitter: Emitter): EngineEmitter => ({
   tubes: emitter.tubes.map((tube) => ({ ...tube, watts: tube.watts * emitter.maintenance })),
+});
+
+export const toEnginePass = (
+  pass: { readonly path: readonly PlanPoint[]; readonly speed: number; readonly heading: number | null },
+  emitter: Emitter,
+): EnginePass => ({
+  emitter: toEngineEmitter(emitter),
+  path: pass.path,
+  speed: pass.speed,
+  headingDeg: pass.heading,
 });
 
 export const toPlacement = (

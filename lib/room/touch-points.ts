@@ -1,4 +1,5 @@
-import { normaliseDegrees } from '@/lib/units';
+import type { Vector3 } from '@/lib/engine/types';
+import { normaliseDegrees, toRadians } from '@/lib/units';
 import type { FloorPlan, TouchPoint } from './schema/floor-plan';
 import type { PlanPoint } from './schema/primitives';
 import { inPlan } from './to-scene';
@@ -33,3 +34,13 @@ export const placedTouchPoints = (
     pieceName: null,
   })),
 ];
+
+/** A touch point as the engine reads it: where it is, and the unit vector it faces along. */
+export function toSpot({ at, point, facing }: PlacedTouchPoint): { p: Vector3; n: Vector3 } {
+  const level = Math.cos(toRadians(point.tilt));
+  const angle = toRadians(facing);
+  return {
+    p: [at[0], at[1], point.height],
+    n: [level * Math.cos(angle), level * Math.sin(angle), Math.sin(toRadians(point.tilt))],
+  };
+}
