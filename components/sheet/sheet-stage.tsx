@@ -103,52 +103,53 @@ export function SheetStage(props: SheetStageProps) {
       style={{ cursor: panning.moving ? 'grabbing' : panning.spaceHeld ? 'grab' : props.cursor }}
     >
       {size.width > 0 && fontsReady ? (
-        <Stage
-          width={size.width}
-          height={size.height}
-          role="img"
-          aria-label={props.label}
-          onWheel={control.onWheel}
-          onPointerDown={(event) => {
-            // A drag goes on outside the sheet's edge.
-            if (event.evt.target instanceof Element) event.evt.target.setPointerCapture(event.evt.pointerId);
-            if (panning.down(event)) props.onInterrupt?.();
-            if (pass(event, props.onPointerDown) === 'pan') panning.take(event);
-          }}
-          onPointerMove={(event) => {
-            if (!panning.move(event)) pass(event, props.onPointerMove);
-          }}
-          onPointerUp={(event) => {
-            pass(event, props.onPointerUp);
-            panning.up(event);
-          }}
-          onPointerCancel={(event) => {
-            panning.up(event);
-            props.onInterrupt?.();
-          }}
-          onDblClick={(event: Konva.KonvaEventObject<MouseEvent>) =>
-            pass(event as unknown as Konva.KonvaEventObject<PointerEvent>, props.onDoubleClick)
-          }
-          onPointerLeave={(event) => {
-            panning.up(event);
-            props.onPointerLeave?.();
-          }}
-        >
-          <SheetScaleProvider value={viewport.scale}>
-            <Layer listening={false}>
-              <InPlan viewport={viewport}>
-                {props.underlay}
-                {props.children}
-              </InPlan>
-            </Layer>
-            <Layer>
-              <InPlan viewport={viewport}>{props.overlay}</InPlan>
-            </Layer>
-            <Layer listening={false}>
-              <Rulers viewport={viewport} size={size} />
-            </Layer>
-          </SheetScaleProvider>
-        </Stage>
+        <div role="img" aria-label={props.label}>
+          <Stage
+            width={size.width}
+            height={size.height}
+            onWheel={control.onWheel}
+            onPointerDown={(event) => {
+              // A drag goes on outside the sheet's edge.
+              if (event.evt.target instanceof Element)
+                event.evt.target.setPointerCapture(event.evt.pointerId);
+              if (panning.down(event)) props.onInterrupt?.();
+              if (pass(event, props.onPointerDown) === 'pan') panning.take(event);
+            }}
+            onPointerMove={(event) => {
+              if (!panning.move(event)) pass(event, props.onPointerMove);
+            }}
+            onPointerUp={(event) => {
+              pass(event, props.onPointerUp);
+              panning.up(event);
+            }}
+            onPointerCancel={(event) => {
+              panning.up(event);
+              props.onInterrupt?.();
+            }}
+            onDblClick={(event: Konva.KonvaEventObject<MouseEvent>) =>
+              pass(event as unknown as Konva.KonvaEventObject<PointerEvent>, props.onDoubleClick)
+            }
+            onPointerLeave={(event) => {
+              panning.up(event);
+              props.onPointerLeave?.();
+            }}
+          >
+            <SheetScaleProvider value={viewport.scale}>
+              <Layer listening={false}>
+                <InPlan viewport={viewport}>
+                  {props.underlay}
+                  {props.children}
+                </InPlan>
+              </Layer>
+              <Layer>
+                <InPlan viewport={viewport}>{props.overlay}</InPlan>
+              </Layer>
+              <Layer listening={false}>
+                <Rulers viewport={viewport} size={size} />
+              </Layer>
+            </SheetScaleProvider>
+          </Stage>
+        </div>
       ) : null}
       <div className="on-sheet absolute bottom-3 left-10 flex flex-col overflow-hidden rounded border border-[#b9b3a5] bg-[#fcfbf7] text-[#1e2326]">
         <ZoomButton

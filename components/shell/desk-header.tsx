@@ -51,12 +51,7 @@ export function DeskHeader({
                       {crumb.label}
                     </Link>
                   ) : (
-                    <span
-                      aria-current={last ? 'page' : undefined}
-                      className={last ? 'truncate font-semibold' : ''}
-                    >
-                      {crumb.label}
-                    </span>
+                    <CrumbText label={crumb.label} last={last} title={tabs.length > 0} />
                   )}
                   {last ? null : <span aria-hidden>/</span>}
                 </li>
@@ -92,6 +87,21 @@ export function DeskHeader({
         <UserMenu />
       </div>
     </header>
+  );
+}
+
+/** The last crumb names the page: on a room's pages it is their heading. */
+function CrumbText({ label, last, title }: { label: string; last: boolean; title: boolean }) {
+  if (!last) return <span>{label}</span>;
+  const look = 'truncate font-semibold';
+  return title ? (
+    <h1 aria-current="page" className={look}>
+      {label}
+    </h1>
+  ) : (
+    <span aria-current="page" className={look}>
+      {label}
+    </span>
   );
 }
 

@@ -146,7 +146,7 @@ export function SetEditor(props: SetEditorProps) {
             />
             <TargetLine set={set} />
           </div>
-          <div className="sheet-frame min-h-0 flex-1" style={sheetProportion(plan.outline)}>
+          <div className="sheet-frame min-h-0 flex-1 max-lg:flex-none" style={sheetProportion(plan.outline)}>
             <DoseSheet
               plan={plan}
               set={set}

@@ -27,7 +27,7 @@ function Frame({
     <div className={`flex flex-col gap-1 ${className}`}>
       <label htmlFor={id} className="text-sm text-ink-2">
         {label}
-        {unit ? <span className="opacity-80"> ({unit})</span> : null}
+        {unit ? ` (${unit})` : null}
       </label>
       {children}
       {hint && !error ? (

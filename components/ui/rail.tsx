@@ -24,8 +24,7 @@ export function Rail<T extends string>({
   children?: ReactNode;
 }) {
   return (
-    <div
-      role="toolbar"
+    <section
       aria-label="Tools"
       className="flex shrink-0 gap-1 overflow-x-auto border-rule bg-desk p-1.5 max-lg:sticky max-lg:bottom-0 max-lg:z-20 max-lg:order-last max-lg:border-t lg:w-16 lg:flex-col lg:border-r"
     >
@@ -45,7 +44,7 @@ export function Rail<T extends string>({
         </button>
       ))}
       {children}
-    </div>
+    </section>
   );
 }
 
