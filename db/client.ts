@@ -28,6 +28,31 @@ const isBusy = (error: unknown): boolean => {
   return false;
 };
 
+/** An address as it may be shown: without a password or token in it. */
+const shown = (url: string): string => url.replace(/\/\/[^/@]*@/, '//').replace(/[?#].*$/s, '');
+
+/** The words at the bottom of a chain of causes: what it really was. */
+function reasonOf(error: unknown): string {
+  let deepest = error;
+  while (deepest instanceof Error && deepest.cause instanceof Error) deepest = deepest.cause;
+  return deepest instanceof Error ? deepest.message : String(deepest);
+}
+
+/** Opens the file or finds the server; says in one line which one it was when that fails. */
+async function connect(url: string) {
+  try {
+    const isFile = url.startsWith('file:');
+    if (isFile) mkdirSync(path.dirname(path.resolve(url.slice('file:'.length))), { recursive: true });
+    const client = createClient({ url, authToken: process.env.DATABASE_AUTH_TOKEN, timeout: LOCK_WAIT_MS });
+    await client.execute(isFile ? 'PRAGMA journal_mode = WAL' : 'select 1');
+    return client;
+  } catch (error) {
+    throw new Error(`The database at "${shown(url)}" (DATABASE_URL) cannot be opened: ${reasonOf(error)}`, {
+      cause: error,
+    });
+  }
+}
+
 const pause = (ms: number) => new Promise((resolve) => setTimeout(resolve, ms));
 
 /**
@@ -36,10 +61,7 @@ const pause = (ms: number) => new Promise((resolve) => setTimeout(resolve, ms));
  * when the wait runs out, tried again.
  */
 export async function openDatabase(url: string): Promise<Database> {
-  const isFile = url.startsWith('file:');
-  if (isFile) mkdirSync(path.dirname(path.resolve(url.slice('file:'.length))), { recursive: true });
-  const client = createClient({ url, authToken: process.env.DATABASE_AUTH_TOKEN, timeout: LOCK_WAIT_MS });
-  if (isFile) await client.execute('PRAGMA journal_mode = WAL');
+  const client = await connect(url);
   const db = drizzle(client, { schema });
 
   let last: Promise<unknown> = Promise.resolve();

@@ -3,7 +3,7 @@ import { z } from 'zod';
 const schema = z.object({
   DATABASE_URL: z
     .string()
-    .regex(/^(file:|libsql:|https?:|wss?:)/, 'must be file:… or the address of a libSQL server')
+    .regex(/^(file:|libsql:|https?:|wss?:)./, 'must be file:… or the address of a libSQL server')
     .default('file:data/leeside.db'),
   NEXTAUTH_SECRET: z.string().min(32, 'must be at least 32 characters'),
   NEXTAUTH_URL: z.url('must be the address people open, such as https://leeside.example.test'),
