@@ -33,7 +33,7 @@ export function SurfacePicker({
   const known = planes.find((plane) => value.kind === 'plane' && plane.z === value.z);
   const current = value.kind === 'plane' ? (known?.value ?? OWN) : value.kind;
   return (
-    <div className="flex flex-wrap items-center gap-3">
+    <div className="flex min-w-0 flex-wrap items-center gap-3">
       <span className="text-sm text-ink-2">Surface</span>
       <Segmented
         label="Surface"

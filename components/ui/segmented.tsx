@@ -15,7 +15,7 @@ export function Segmented<T extends string>({
   onChange: (value: T) => void;
 }) {
   return (
-    <fieldset className="inline-flex overflow-hidden rounded border border-ink-2/50">
+    <fieldset className="inline-flex max-w-full min-w-0 overflow-x-auto rounded border border-ink-2/50">
       <legend className="sr-only">{label}</legend>
       {options.map((option) => (
         <button

@@ -26,13 +26,16 @@ export async function savesAnswered(): Promise<void> {
 
 /**
  * Keeps one value saved: waits for a pause in editing, sends one request at a time and always the newest
- * value. A refusal stops and says so; a broken line is tried again until it holds. Nothing is dropped: the
+ * value. A refusal stops and says so; a broken line is tried again until it holds, first with the very value
+ * whose answer was lost: the server may have it already, and knows a repeated save. Nothing is dropped: the
  * value stays with the caller whatever the answer. Values are compared by identity: replace, never mutate.
  */
 export class Autosaver<T> {
   private current: T;
   private saved: T;
   private standing: SaveStanding = { state: 'saved', savedAt: null, message: null, winner: null };
+  /** Was sent, and the line broke before the answer: nobody here knows whether the server has it. */
+  private inDoubt: { readonly value: T } | null = null;
   private running: Promise<boolean> | null = null;
   private timer: ReturnType<typeof setTimeout> | undefined;
   private readonly listeners = new Set<() => void>();
@@ -56,7 +59,7 @@ export class Autosaver<T> {
   readonly getStanding = (): SaveStanding => this.standing;
 
   get hasUnsaved(): boolean {
-    return this.current !== this.saved;
+    return this.current !== this.saved || this.inDoubt !== null;
   }
 
   /** Takes the newest value and saves it after a pause. In a conflict it only keeps it: the person decides. */
@@ -87,18 +90,23 @@ export class Autosaver<T> {
     this.current = value;
     this.saved = value;
     this.etag = etag;
+    this.inDoubt = null;
     this.say({ state: 'saved', message: null, winner: null });
   }
 
   private async run(): Promise<boolean> {
     while (this.hasUnsaved) {
-      const sending = this.current;
+      const sending = this.inDoubt ? this.inDoubt.value : this.current;
       this.say({ state: 'saving' });
       try {
         this.etag = (await this.save(sending, this.etag)).etag;
         this.saved = sending;
+        this.inDoubt = null;
       } catch (error) {
+        this.inDoubt = error instanceof AppError ? null : { value: sending };
         this.refuse(error);
+        // What was refused is not what is on the desk any more: that is for the server to judge.
+        if (this.standing.state === 'error' && sending !== this.current) continue;
         return false;
       }
     }
@@ -111,6 +119,7 @@ export class Autosaver<T> {
       this.say({ state: 'offline' });
       this.later(this.retryMs);
     } else if (error.code === 'stale') {
+      clearTimeout(this.timer);
       this.say({ state: 'conflict', message: error.message, winner: error.extra });
     } else {
       this.say({ state: 'error', message: error.message });

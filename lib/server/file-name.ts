@@ -4,6 +4,7 @@ import 'server-only';
 export const fileName = (name: string, ending: string): string => {
   const plain = name
     .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
     .toLowerCase()
     .replace(/[^a-z0-9.]+/g, '-')
     .replace(/^[-.]+|[-.]+$/g, '');
