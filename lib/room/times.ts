@@ -18,7 +18,10 @@ export const emitterOf = (
   set: Pick<StopSet, 'emitter'>,
   item: { readonly emitter: string | null },
   emitters: Emitters,
-): Emitter | undefined => emitters[item.emitter ?? set.emitter];
+): Emitter | undefined => {
+  const key = item.emitter ?? set.emitter;
+  return Object.hasOwn(emitters, key) ? emitters[key] : undefined;
+};
 
 const distance = (from: PlanPoint, to: PlanPoint): number => Math.hypot(to[0] - from[0], to[1] - from[1]);
 

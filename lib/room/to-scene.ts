@@ -50,7 +50,9 @@ const toWallOpening = (opening: Opening): WallOpening => ({
 /**
  * The engine's walls have no thickness. The outline is its room-side face. An inner wall's slab becomes its
  * four sides with the openings in both faces: a slab is convex, so a ray through both faces' openings stays
- * inside the reveal, and any other ray meets a side. The pane's transmittance is counted once, on the first face.
+ * inside the reveal, and any other ray meets a side. Where a wall has several openings their jambs stand in the
+ * slab too, or a ray could go in by one and out by the next through the pier between. The pane's transmittance
+ * is counted once, on the first face.
  */
 function wallsOf(plan: FloorPlan): Wall[] {
   const openingsOn = (wall: string) =>
@@ -69,7 +71,17 @@ function wallsOf(plan: FloorPlan): Wall[] {
       transmittance: opening.transmittance > 0 ? 1 : 0,
     }));
     const [a1, b1, b2, a2] = slab;
+    const span = Math.hypot(wall.b[0] - wall.a[0], wall.b[1] - wall.a[1]);
+    const across = (metres: number): Wall => {
+      const on = (p: PlanPoint, q: PlanPoint): PlanPoint => [
+        p[0] + ((q[0] - p[0]) * metres) / span,
+        p[1] + ((q[1] - p[1]) * metres) / span,
+      ];
+      return { a: on(a1, b1), b: on(a2, b2), openings: [] };
+    };
+    const jambs = openings.length > 1 ? openings.flatMap(({ from, to }) => [across(from), across(to)]) : [];
     return [
+      ...jambs,
       { a: a1, b: b1, openings },
       { a: a2, b: b2, openings: farFace },
       { a: a1, b: a2, openings: [] },
