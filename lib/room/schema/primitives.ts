@@ -1,9 +1,11 @@
 import { z } from 'zod';
+import './plain-words';
 
 /** Lengths beyond this are a slip of the keyboard, not a room. */
 export const MAX_METRES = 500;
 
-const finite = (what: string) => z.number({ error: `${what} must be a number` });
+const finite = (what: string) =>
+  z.number({ error: ({ code }) => (code === 'invalid_type' ? `${what} must be a number` : undefined) });
 
 /** A plan coordinate in metres. */
 export const coordinate = finite('A coordinate').min(-MAX_METRES).max(MAX_METRES);
