@@ -1,7 +1,7 @@
 import { newRoomSchema, roomListSchema, roomSummarySchema } from '@/lib/room/api/resources';
 import { database } from '@/lib/server/database';
 import { createRoom } from '@/lib/server/rooms/create-room';
-import { getRoom, listRooms } from '@/lib/server/rooms/list-rooms';
+import { listRooms } from '@/lib/server/rooms/list-rooms';
 import { route } from '@/lib/server/route';
 
 export const GET = route({
@@ -14,9 +14,5 @@ export const POST = route({
   permission: 'rooms:write',
   body: newRoomSchema,
   answer: roomSummarySchema,
-  run: async ({ actor, body }) => {
-    const open = await database();
-    const id = await createRoom(open, actor, body);
-    return { value: await getRoom(open.db, actor, id), status: 201 };
-  },
+  run: async ({ actor, body }) => ({ value: await createRoom(await database(), actor, body), status: 201 }),
 });

@@ -6,13 +6,14 @@ import { AppError } from '@/lib/errors';
 import type { Actor } from '../actor';
 import { audit } from '../audit';
 import { newId } from '../new-id';
+import { getRoom, type RoomSummary } from './list-rooms';
 
 /** A room with nothing drawn in it yet. */
 export function createRoom(
   { write }: Database,
   actor: Actor,
   { siteId, name, area }: { siteId: string; name: string; area?: string },
-): Promise<string> {
+): Promise<RoomSummary> {
   return write(async (tx) => {
     const [site] = await tx
       .select()
@@ -29,6 +30,6 @@ export function createRoom(
       createdAt: new Date(),
     });
     await audit(tx, actor, 'add room', 'room', id, { name });
-    return id;
+    return getRoom(tx, actor, id);
   });
 }

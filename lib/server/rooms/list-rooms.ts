@@ -1,16 +1,16 @@
 import 'server-only';
 import { and, asc, eq, max } from 'drizzle-orm';
 import type { z } from 'zod';
-import type { Db } from '@/db/client';
+import type { Db, Tx } from '@/db/client';
 import { floorPlans, revisions, rooms, sites, stopSets, users } from '@/db/schema';
 import { AppError } from '@/lib/errors';
 import type { roomSummarySchema } from '@/lib/room/api/resources';
 import type { Actor } from '../actor';
 
-type RoomSummary = z.input<typeof roomSummarySchema>;
+export type RoomSummary = z.input<typeof roomSummarySchema>;
 
 /** The organisation's rooms (or the one asked for), with what is needed to see their state at a glance. */
-export async function listRooms(db: Db, actor: Actor, roomId?: string): Promise<RoomSummary[]> {
+export async function listRooms(db: Db | Tx, actor: Actor, roomId?: string): Promise<RoomSummary[]> {
   const mine = and(
     eq(rooms.organisationId, actor.organisationId),
     roomId === undefined ? undefined : eq(rooms.id, roomId),
@@ -67,7 +67,7 @@ export async function listRooms(db: Db, actor: Actor, roomId?: string): Promise<
 }
 
 /** One room's summary. */
-export async function getRoom(db: Db, actor: Actor, roomId: string): Promise<RoomSummary> {
+export async function getRoom(db: Db | Tx, actor: Actor, roomId: string): Promise<RoomSummary> {
   const [room] = await listRooms(db, actor, roomId);
   if (!room) throw new AppError('not_found', 'There is no such room.');
   return room;

@@ -16,9 +16,7 @@ export const PATCH = route({
   params: roomParams,
   body: roomChangeSchema,
   answer: roomSummarySchema,
-  run: async ({ actor, params, body }) => {
-    const open = await database();
-    await changeRoom(open, actor, params.roomId, body);
-    return { value: await getRoom(open.db, actor, params.roomId) };
-  },
+  run: async ({ actor, params, body }) => ({
+    value: await changeRoom(await database(), actor, params.roomId, body),
+  }),
 });
