@@ -1,3 +1,4 @@
+import { MERGE } from '@/lib/geometry/degenerate';
 import type { PlacedTube } from './placed-tube';
 import type { Pieces } from './prepare-scene';
 import type { Shadows } from './shadows';
@@ -8,6 +9,7 @@ import type { Shadows } from './shadows';
  * In plan all rays run along one line; it lies inside the footprint for s in (sIn, sOut), s the fraction of the
  * way from p. The ray to tube height h passes height p.z + s (h − p.z), so a point of the solid at height z and
  * fraction s hides h = p.z + (z − p.z)/s: the stretch runs from the least such h (underside) to the greatest (top).
+ * Answers whether it is the whole tube.
  */
 export function shadeUpright(
   pieces: Pieces,
@@ -17,7 +19,7 @@ export function shadeUpright(
   py: number,
   pz: number,
   shadows: Shadows,
-): void {
+): boolean {
   const { start, nx, ny, c } = pieces;
   const dx = tube.ax - px;
   const dy = tube.ay - py;
@@ -30,8 +32,8 @@ export function shadeUpright(
       if (out + sOut * rate > 0) sOut = -out / rate;
     } else if (rate < 0) {
       if (out + sIn * rate > 0) sIn = -out / rate;
-    } else if (out > 0) return;
-    if (sIn >= sOut) return;
+    } else if (out > 0) return false;
+    if (sIn >= sOut) return false;
   }
   const base = pieces.base[k] - pz;
   const top = pieces.top[k] - pz;
@@ -41,15 +43,24 @@ export function shadeUpright(
   const lo = (shift + low) / tube.length;
   const hi = (shift + high) / tube.length;
   if (lo < 1 && hi > 0) shadows.hide(lo, hi);
+  return lo <= 0 && hi >= 1;
 }
 
-/** Scratch for clipping: a triangle cut by n sides has at most n + 3 corners. */
+/** Scratch for clipping: a triangle cut by n faces has at most n + 3 corners. */
 export class ClipBuffer {
-  readonly s: [Float64Array, Float64Array];
-  readonly w: [Float64Array, Float64Array];
-  constructor(corners: number) {
-    this.s = [new Float64Array(corners), new Float64Array(corners)];
-    this.w = [new Float64Array(corners), new Float64Array(corners)];
+  readonly s: Float64Array;
+  readonly w: Float64Array;
+  readonly s2: Float64Array;
+  readonly w2: Float64Array;
+  /** g0, gs, gw of every face that cuts. */
+  readonly faces: Float64Array;
+  constructor(mostSides: number) {
+    const corners = mostSides + 5;
+    this.s = new Float64Array(corners);
+    this.w = new Float64Array(corners);
+    this.s2 = new Float64Array(corners);
+    this.w2 = new Float64Array(corners);
+    this.faces = new Float64Array(3 * (mostSides + 2));
   }
 }
 
@@ -59,6 +70,7 @@ export class ClipBuffer {
  * A point of the plane through p and the tube is p + s (a − p) + w (b − a), where w = s·t on the ray to the tube's
  * fraction t. Every face of the solid is linear in (s, w), so its slice is the triangle of all rays clipped by the
  * faces; t = w/s is projective, so over that convex slice it is least and greatest at corners.
+ * Answers whether all of t0..t1 is hidden by this piece alone.
  */
 export function shadeGeneral(
   pieces: Pieces,
@@ -71,7 +83,7 @@ export function shadeGeneral(
   t1: number,
   shadows: Shadows,
   buffer: ClipBuffer,
-): void {
+): boolean {
   const { start, nx, ny, c } = pieces;
   const dx = tube.ax - px;
   const dy = tube.ay - py;
@@ -80,17 +92,11 @@ export function shadeGeneral(
   const by = tube.uy * tube.length;
   const bz = tube.uz * tube.length;
 
-  let from = 0;
-  buffer.s[0][0] = 0;
-  buffer.w[0][0] = 0;
-  buffer.s[0][1] = 1;
-  buffer.w[0][1] = t0;
-  buffer.s[0][2] = 1;
-  buffer.w[0][2] = t1;
-  let corners = 3;
-
   const first = start[k];
   const sides = start[k + 1] - first;
+  const { faces } = buffer;
+  // Faces that cut the triangle; one that has all of it outside means that nothing is hidden.
+  let cutting = 0;
   for (let i = 0; i < sides + 2; i++) {
     // g0 + gs·s + gw·w ≤ 0 keeps the inside of this face.
     let g0: number;
@@ -113,42 +119,61 @@ export function shadeGeneral(
     }
     const q0 = g0 + gs + gw * t0;
     const q1 = g0 + gs + gw * t1;
-    if (g0 > 0 && q0 > 0 && q1 > 0) return;
-    if (g0 <= 0 && q0 <= 0 && q1 <= 0) continue;
-    const s = buffer.s[from];
-    const w = buffer.w[from];
-    const s2 = buffer.s[1 - from];
-    const w2 = buffer.w[1 - from];
+    if (g0 > 0) {
+      if (q0 > 0 && q1 > 0) return false;
+    } else if (q0 <= 0 && q1 <= 0) continue;
+    faces[cutting] = g0;
+    faces[cutting + 1] = gs;
+    faces[cutting + 2] = gw;
+    cutting += 3;
+  }
+
+  let { s, w, s2, w2 } = buffer;
+  s[0] = 0;
+  w[0] = 0;
+  s[1] = 1;
+  w[1] = t0;
+  s[2] = 1;
+  w[2] = t1;
+  let corners = 3;
+  for (let f = 0; f < cutting; f += 3) {
+    const g0 = faces[f];
+    const gs = faces[f + 1];
+    const gw = faces[f + 2];
     let kept = 0;
     let ls = s[corners - 1];
     let lw = w[corners - 1];
     let lg = g0 + gs * ls + gw * lw;
     for (let j = 0; j < corners; j++) {
-      const g = g0 + gs * s[j] + gw * w[j];
+      const cs = s[j];
+      const cw = w[j];
+      const g = g0 + gs * cs + gw * cw;
       if (g > 0 !== lg > 0) {
-        const f = lg / (lg - g);
-        s2[kept] = ls + f * (s[j] - ls);
-        w2[kept++] = lw + f * (w[j] - lw);
+        const share = lg / (lg - g);
+        s2[kept] = ls + share * (cs - ls);
+        w2[kept++] = lw + share * (cw - lw);
       }
       if (g <= 0) {
-        s2[kept] = s[j];
-        w2[kept++] = w[j];
+        s2[kept] = cs;
+        w2[kept++] = cw;
       }
-      ls = s[j];
-      lw = w[j];
+      ls = cs;
+      lw = cw;
       lg = g;
     }
-    if (kept < 3) return;
+    if (kept < 3) return false;
     corners = kept;
-    from = 1 - from;
+    [s, s2] = [s2, s];
+    [w, w2] = [w2, w];
   }
   let lo = Infinity;
   let hi = -Infinity;
   for (let j = 0; j < corners; j++) {
-    if (buffer.s[from][j] <= 0) continue;
-    const t = buffer.w[from][j] / buffer.s[from][j];
+    if (s[j] <= 0) continue;
+    const t = w[j] / s[j];
     if (t < lo) lo = t;
     if (t > hi) hi = t;
   }
   if (lo < hi) shadows.hide(lo, hi);
+  return lo <= t0 + MERGE && hi >= t1 - MERGE;
 }

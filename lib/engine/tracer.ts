@@ -5,12 +5,15 @@ import type { PreparedScene } from './prepare-scene';
 import { ClipBuffer, shadeGeneral, shadeUpright } from './shadow-of-piece';
 import { shadeByWall } from './shadow-of-wall';
 import { Shadows } from './shadows';
+import { StandingBetween } from './standing-between';
 
 /** Everything one thread needs to trace receivers in a scene, allocated once. */
 export interface Tracer {
   readonly scene: PreparedScene;
   readonly shadows: Shadows;
   readonly buffer: ClipBuffer;
+  /** What is looked at: everything, until a block of receivers narrows it. */
+  readonly between: StandingBetween;
 }
 
 export function createTracer(scene: PreparedScene): Tracer {
@@ -24,7 +27,8 @@ export function createTracer(scene: PreparedScene): Tracer {
     scene,
     // A piece hides one stretch; a wall one more than it has openings.
     shadows: new Shadows(pieces.count + walls.count + openings + 1),
-    buffer: new ClipBuffer(mostSides + 8),
+    buffer: new ClipBuffer(mostSides),
+    between: new StandingBetween(scene),
   };
 }
 
@@ -71,7 +75,7 @@ export function traceTube(
   }
   const t0 = (l0 + along) / tube.length;
   const t1 = (l1 + along) / tube.length;
-  traceShadows(tracer, tube, px, py, pz, t0, t1);
+  if (traceShadows(tracer, tube, px, py, pz, t0, t1)) return 0;
 
   const { shadows } = tracer;
   let sum = 0;
@@ -101,22 +105,32 @@ export function traceCell(tracer: Tracer, tube: PlacedTube, x: number, y: number
   return value === ON_TUBE ? traceTube(tracer, tube, x + BESIDE, y + BESIDE, z, false, 0, 0, 1) : value;
 }
 
-/** Fills the tracer's shadows with all that hides or dims the tube between the fractions t0 and t1. */
+/**
+ * Fills the tracer's shadows with all that hides or dims the tube between the fractions t0 and t1. Answers true, and
+ * leaves the rest unseen, as soon as one piece hides all of it.
+ */
 export function traceShadows(
-  { scene, shadows, buffer }: Tracer,
+  { scene, shadows, buffer, between }: Tracer,
   tube: PlacedTube,
   px: number,
   py: number,
   pz: number,
   t0: number,
   t1: number,
-): void {
+): boolean {
   shadows.clear();
-  for (let k = 0; k < scene.walls.count; k++) {
-    shadeByWall(scene.walls, k, tube, px, py, pz, t0, t1, shadows);
+  for (let i = 0; i < between.wallCount; i++) {
+    shadeByWall(scene.walls, between.walls[i], tube, px, py, pz, t0, t1, shadows);
   }
-  for (let k = 0; k < scene.pieces.count; k++) {
-    if (tube.upright) shadeUpright(scene.pieces, k, tube, px, py, pz, shadows);
-    else shadeGeneral(scene.pieces, k, tube, px, py, pz, t0, t1, shadows, buffer);
+  for (let i = 0; i < between.pieceCount; i++) {
+    const k = between.pieces[i];
+    const dark = tube.upright
+      ? shadeUpright(scene.pieces, k, tube, px, py, pz, shadows)
+      : shadeGeneral(scene.pieces, k, tube, px, py, pz, t0, t1, shadows, buffer);
+    if (dark) {
+      between.lookFirstAt(i);
+      return true;
+    }
   }
+  return false;
 }
