@@ -31,7 +31,9 @@ export function env(): Env {
       const name = String(issue.path[0]);
       return `${name} ${name in source ? issue.message : 'is missing'}`;
     });
-    throw new Error(`Leeside cannot start: ${lines.join('; ')}. Set it in the environment and start again.`);
+    throw new Error(
+      `Leeside cannot start: ${lines.join('; ')}. Set this in the environment and start again.`,
+    );
   }
   read = parsed.data;
   return read;

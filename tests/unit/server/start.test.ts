@@ -19,17 +19,25 @@ async function withSettings(settings: Record<string, string>) {
   return { register, env, database };
 }
 
-const failureOf = (work: () => Promise<void>) =>
-  work().then(
-    () => 'started',
-    (error: Error) => error.message,
-  );
+/** How a start went: what it said before it ended the process, or `started`. */
+async function outcomeOf(register: () => Promise<void>): Promise<string> {
+  const said = vi.spyOn(console, 'error').mockImplementation(() => {});
+  const exit = vi.spyOn(process, 'exit').mockImplementation(() => undefined as never);
+  await register();
+  if (exit.mock.calls.length === 0) return 'started';
+  expect(exit.mock.calls).toEqual([[1]]);
+  expect(said.mock.calls).toHaveLength(1);
+  return String(said.mock.calls[0][0]);
+}
 
 let DATABASE_URL: string;
 beforeEach(() => {
   DATABASE_URL = freshDatabaseUrl();
 });
-afterEach(() => vi.unstubAllEnvs());
+afterEach(() => {
+  vi.unstubAllEnvs();
+  vi.restoreAllMocks();
+});
 
 describe('a server in production', () => {
   test.each<[string, Record<string, string>, string[]]>([
@@ -63,7 +71,7 @@ describe('a server in production', () => {
     ],
   ])('given %s refuses to start and names what is wrong', async (_, settings, words) => {
     const { register } = await withSettings({ DATABASE_URL, ...settings });
-    const message = await failureOf(register);
+    const message = await outcomeOf(register);
     expect(message).toMatch(/^Leeside cannot start: /);
     for (const word of words) expect(message).toContain(word);
     expect(message.match(/is missing|must be/g)).toHaveLength(words.length);
@@ -76,7 +84,7 @@ describe('a server in production', () => {
       NEXTAUTH_SECRET: SECRET,
       NEXTAUTH_URL: HOME,
     });
-    expect(await failureOf(register)).toBe('started');
+    expect(await outcomeOf(register)).toBe('started');
     const opened = await database();
     const { rows } = await opened.db.run('select count(*) as n from rooms');
     expect(rows[0].n).toBe(0);
@@ -89,12 +97,22 @@ describe('a server in production', () => {
       NEXTAUTH_SECRET: SECRET,
       NEXTAUTH_URL: HOME,
     });
-    expect(await failureOf(register)).toContain('DATABASE_URL');
+    expect(await outcomeOf(register)).toContain('DATABASE_URL');
     const first = database();
     await expect(first).rejects.toThrow();
     expect(database()).not.toBe(first);
     await expect(database()).rejects.toThrow();
   });
+});
+
+test('a developer’s server that cannot open its database says so and stays up', async () => {
+  const { register } = await withSettings({
+    DATABASE_URL: 'file:package.json/x.db',
+    NODE_ENV: 'development',
+  });
+  const exit = vi.spyOn(process, 'exit').mockImplementation(() => undefined as never);
+  await expect(register()).rejects.toThrow('DATABASE_URL');
+  expect(exit).not.toHaveBeenCalled();
 });
 
 test('a developer’s server starts with nothing set, and says that its secret is none', async () => {
@@ -104,6 +122,6 @@ test('a developer’s server starts with nothing set, and says that its secret i
 
 test('outside Node nothing is opened', async () => {
   const { register } = await withSettings({ DATABASE_URL, NEXT_RUNTIME: 'edge' });
-  expect(await failureOf(register)).toBe('started');
+  expect(await outcomeOf(register)).toBe('started');
   expect(existsSync(DATABASE_URL.slice('file:'.length))).toBe(false);
 });
