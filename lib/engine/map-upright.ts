@@ -80,41 +80,50 @@ function lightRun(
   const dy = y - tube.ay;
   const start = j * columns;
   shadows.cast(silhouettes, j, first, end, z, v0, v1);
-  if (Math.abs(dy) <= EDGE && v0 === 0) markTouching(shadows, first, end, dx0, step);
+  const touching = Math.abs(dy) <= EDGE && v0 === 0 ? Math.round(-dx0 / step) : -1;
+  if (touching >= first && touching < end && Math.abs(dx0 + touching * step) <= EDGE) {
+    // A cell whose centre touches the tube is read beside it.
+    shadows.lit.remove(touching, touching + 1);
+    if (mask[start + touching] !== 0)
+      out[start + touching] += traceCell(tracer, tube, originX + (touching + 0.5) * step, y, z);
+  }
 
   const half = tube.strength / 2;
-  openRun(mask, out, start, first, shadows.touchedFrom, dx0, step, dy, v0, v1, half);
-  openRun(
-    mask,
-    out,
-    start,
-    Math.max(shadows.touchedFrom, shadows.touchedTo),
-    end,
-    dx0,
-    step,
-    dy,
-    v0,
-    v1,
-    half,
-  );
-
-  const { low, high, count, retrace } = shadows;
-  const least = MERGE * tube.length;
-  for (let i = shadows.touchedFrom; i < shadows.touchedTo; i++) {
-    if (mask[start + i] === 0) continue;
-    if (retrace[i] === 1) {
-      out[start + i] += traceCell(tracer, tube, originX + (i + 0.5) * step, y, z);
-      continue;
+  const { lit, touchedFrom, touchedTo } = shadows;
+  for (let span = 0; span < lit.count; span++) {
+    const from = lit.from[span];
+    const to = lit.to[span];
+    openRun(mask, out, start, from, Math.min(to, touchedFrom), dx0, step, dy, v0, v1, half);
+    openRun(mask, out, start, Math.max(from, touchedFrom, touchedTo), to, dx0, step, dy, v0, v1, half);
+    const last = Math.min(to, touchedTo);
+    for (let i = Math.max(from, touchedFrom); i < last; i++) {
+      if (mask[start + i] === 0) continue;
+      if (shadows.retrace[i] === 1)
+        out[start + i] += traceCell(tracer, tube, originX + (i + 0.5) * step, y, z);
+      else out[start + i] += partlyLit(shadows, i, columns, dx0 + i * step, dy, half, MERGE * tube.length);
     }
-    if (low[i] + least >= high[i]) continue;
-    const dx = dx0 + i * step;
-    const d2 = dx * dx + dy * dy;
-    const a = low[i] * low[i];
-    const b = high[i] * high[i];
-    let sum = (b - a) / ((d2 + a) * (d2 + b));
-    if (count[i] > 0) sum -= hiddenBetween(shadows, i, columns, d2, least);
-    out[start + i] += half * Math.sqrt(d2) * sum;
   }
+}
+
+/** What a cell gets of the tube between its `low` and `high`, less what is hidden in between. */
+function partlyLit(
+  shadows: RowShadows,
+  i: number,
+  columns: number,
+  dx: number,
+  dy: number,
+  half: number,
+  least: number,
+): number {
+  const low = shadows.low[i];
+  const high = shadows.high[i];
+  if (low + least >= high) return 0;
+  const d2 = dx * dx + dy * dy;
+  const a = low * low;
+  const b = high * high;
+  let sum = (b - a) / ((d2 + a) * (d2 + b));
+  if (shadows.count[i] > 0) sum -= hiddenBetween(shadows, i, columns, d2, least);
+  return half * Math.sqrt(d2) * sum;
 }
 
 /** The open field: no shadow, no look-up, no branch but the mask. */
@@ -141,15 +150,6 @@ function openRun(
     const d2 = dx * dx + dy2;
     out[start + i] += (k * Math.sqrt(d2)) / ((d2 + a) * (d2 + b));
   }
-}
-
-/** A cell whose centre touches the tube is read beside it; only a row through the tube can hold one. */
-function markTouching(shadows: RowShadows, first: number, end: number, dx0: number, step: number): void {
-  const i = Math.round(-dx0 / step);
-  if (i < first || i >= end || Math.abs(dx0 + i * step) > EDGE) return;
-  shadows.retrace[i] = 1;
-  shadows.touchedFrom = Math.min(shadows.touchedFrom, i);
-  shadows.touchedTo = Math.max(shadows.touchedTo, i + 1);
 }
 
 /**

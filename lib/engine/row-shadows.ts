@@ -1,3 +1,4 @@
+import { LitSpans } from './lit-spans';
 import type { PreparedScene } from './prepare-scene';
 import type { RowLines, ShadowSides, Silhouettes } from './silhouettes';
 
@@ -16,11 +17,24 @@ export class RowShadows {
   readonly from: Float64Array;
   readonly to: Float64Array;
   readonly retrace: Uint8Array;
-  /** Columns that anything touched: touchedFrom ≤ i < touchedTo. */
+  /** Columns that any light may reach; the rest of the row is dark. */
+  readonly lit: LitSpans;
+  /** Columns that anything touched: touchedFrom ≤ i < touchedTo. Beside them the arrays above hold nothing. */
   touchedFrom = 0;
   touchedTo = 0;
 
   private readonly reach: Float64Array;
+  /** Stretches of standing parts that hide some of the tube: far side, from column, to column. */
+  private readonly partSide: Int32Array;
+  private readonly partFrom: Int32Array;
+  private readonly partTo: Int32Array;
+  private readonly partTop: Float64Array;
+  private parts = 0;
+  /** Hanging parts whose shadow meets the row, with their stretches. */
+  private readonly hanging: Int32Array;
+  private readonly hangFrom: Int32Array;
+  private readonly hangTo: Int32Array;
+  private hangs = 0;
   private lo = 0;
   private hi = 0;
 
@@ -35,45 +49,83 @@ export class RowShadows {
     this.to = new Float64Array(columns * SLOTS);
     this.retrace = new Uint8Array(columns);
     this.reach = new Float64Array(columns);
+    this.lit = new LitSpans(columns);
+    const { pieces } = scene;
+    const sides = pieces.start[pieces.count];
+    this.partSide = new Int32Array(sides);
+    this.partFrom = new Int32Array(sides);
+    this.partTo = new Int32Array(sides);
+    this.partTop = new Float64Array(sides);
+    this.hanging = new Int32Array(pieces.count);
+    this.hangFrom = new Int32Array(pieces.count);
+    this.hangTo = new Int32Array(pieces.count);
   }
 
-  /** Fills in row j, columns first ≤ i < end, for a tube from v0 to v1 above a surface at height z. */
+  /**
+   * Fills in row j, columns first ≤ i < end, for a tube from v0 to v1 above a surface at height z. Dark stretches are
+   * taken out first, by their ends alone; only what is left is worked out cell by cell.
+   */
   cast(sil: Silhouettes, j: number, first: number, end: number, z: number, v0: number, v1: number): void {
     const { pieces, walls } = this.scene;
-    this.low.fill(v0, first, end);
-    this.high.fill(v1, first, end);
-    this.count.fill(0, first, end);
-    this.retrace.fill(0, first, end);
+    this.lit.reset(first, end);
     this.touchedFrom = end;
     this.touchedTo = first;
+    this.parts = 0;
+    this.hangs = 0;
+    let windows = 0;
     for (let k = 0; k < walls.count; k++) {
-      if (this.stretch(sil, pieces.count + k, j, first, end)) this.castWall(sil, k, j, z, v1);
-    }
-    // Parts that stand on the surface only raise `low`; with that done, most hanging parts join on to it.
-    for (let k = 0; k < pieces.count; k++) {
-      if (pieces.base[k] > z || pieces.top[k] <= z) continue;
-      if (this.stretch(sil, k, j, first, end)) this.castStanding(sil, k, j, pieces.top[k] - z);
+      if (!this.stretch(sil, pieces.count + k, j, first, end)) continue;
+      if (this.letsThrough(k)) windows++;
+      else this.lit.remove(this.lo, this.hi);
     }
     for (let k = 0; k < pieces.count; k++) {
       const base = pieces.base[k] - z;
-      if (base <= 0 || base >= v1) continue;
-      if (this.stretch(sil, k, j, first, end)) this.castHanging(sil, k, j, base, pieces.top[k] - z);
+      const top = pieces.top[k] - z;
+      if (base >= v1 || top <= 0) continue;
+      if (!this.stretch(sil, k, j, first, end)) continue;
+      if (base <= 0) this.sortStanding(sil, k, j, top, v1);
+      else this.noteHanging(k);
     }
+    if (windows > 0) {
+      this.touch(first, end);
+      this.clear(first, end, v0, v1);
+      for (let k = 0; k < walls.count; k++) {
+        if (this.letsThrough(k) && this.stretch(sil, pieces.count + k, j, first, end))
+          this.castWall(sil, k, j, z, v1);
+      }
+    } else this.clear(this.touchedFrom, this.touchedTo, v0, v1);
+    // Parts that stand on the surface only raise `low`; with that done, most hanging parts join on to it.
+    for (let n = 0; n < this.parts; n++) this.castStanding(sil, j, n);
+    for (let n = 0; n < this.hangs; n++) this.castHanging(sil, j, n, z);
+  }
+
+  private touch(lo: number, hi: number): void {
+    if (lo < this.touchedFrom) this.touchedFrom = lo;
+    if (hi > this.touchedTo) this.touchedTo = hi;
+  }
+
+  private clear(from: number, to: number, v0: number, v1: number): void {
+    if (from >= to) return;
+    this.low.fill(v0, from, to);
+    this.high.fill(v1, from, to);
+    this.count.fill(0, from, to);
+    this.retrace.fill(0, from, to);
+  }
+
+  private letsThrough(wall: number): boolean {
+    const { start, transmittance } = this.scene.walls;
+    for (let o = start[wall]; o < start[wall + 1]; o++) if (transmittance[o] > 0) return true;
+    return false;
   }
 
   /** Sets lo..hi to the columns of row j in the shadow of caster k. */
   private stretch(sil: Silhouettes, k: number, j: number, first: number, end: number): boolean {
-    if (j < sil.rowFrom[k] || j > sil.rowTo[k]) return false;
-    const { bounds } = sil;
-    this.lo = first;
-    this.hi = end;
-    for (let b = sil.boundStart[k]; b < sil.boundStart[k + 1]; b++) {
-      this.keep(bounds, b, j);
-      if (this.lo >= this.hi) return false;
-    }
-    if (this.lo < this.touchedFrom) this.touchedFrom = this.lo;
-    if (this.hi > this.touchedTo) this.touchedTo = this.hi;
-    return true;
+    const at = j * sil.count + k;
+    const from = sil.stretchFrom[at];
+    const to = sil.stretchTo[at];
+    this.lo = Math.max(from, first);
+    this.hi = Math.min(to, end);
+    return this.lo < this.hi;
   }
 
   /** Keeps the counted side of a line, the line itself included. */
@@ -93,29 +145,78 @@ export class RowShadows {
   }
 
   /** Narrows lo..hi to the sector of side n in a chain first ≤ n < end. */
-  private sector(cuts: RowLines, n: number, first: number, end: number, j: number, around: number): void {
-    if (n > first || around === 1) this.keep(cuts, n, j);
-    if (n < end - 1) this.drop(cuts, n + 1, j);
-    else if (around === 1) this.drop(cuts, first, j);
+  private sector(sides: ShadowSides, n: number, first: number, end: number, j: number, around: number): void {
+    const { cutAt, cutIsFrom } = sides;
+    const row = j * sides.count;
+    if (n > first || around === 1) {
+      const at = cutAt[row + n];
+      if (cutIsFrom[n] === 1) {
+        if (at > this.lo) this.lo = at;
+      } else if (at < this.hi) this.hi = at;
+    }
+    const next = n < end - 1 ? n + 1 : around === 1 ? first : -1;
+    if (next < 0) return;
+    const at = cutAt[row + next];
+    if (cutIsFrom[next] === 1) {
+      if (at < this.hi) this.hi = at;
+    } else if (at > this.lo) this.lo = at;
   }
 
   /**
    * A part standing on the surface hides the tube up to top/s, s the fraction of the way at which the ray enters it:
-   * top·(1 − gLamp/g). A cell inside the footprint sees nothing.
+   * top·(1 − gLamp/g). A cell inside the footprint sees nothing. What reaches v1 is dark: as g is linear along the row,
+   * that is one end of the side's stretch; the other end is noted for `castStanding`.
    */
-  private castStanding(sil: Silhouettes, k: number, j: number, top: number): void {
-    const { low } = this;
+  private sortStanding(sil: Silhouettes, k: number, j: number, top: number, v1: number): void {
     const { lo, hi } = this;
     const first = sil.farStart[k];
     const end = sil.farStart[k + 1];
     for (let n = first; n < end; n++) {
       this.lo = lo;
       this.hi = hi;
-      this.sector(sil.far.cuts, n, first, end, j, sil.around[k]);
+      this.sector(sil.far, n, first, end, j, sil.around[k]);
+      if (this.lo >= this.hi) continue;
+      if (top >= v1) {
+        this.lit.remove(this.lo, this.hi);
+        continue;
+      }
+      // Dark where g ≤ limit: top + q/g ≥ v1.
+      const limit = (-top * sil.far.gLamp[n]) / (v1 - top);
       const g0 = sil.far.g0[n] + sil.far.gj[n] * j;
       const gi = sil.far.gi[n];
-      const q = -top * sil.far.gLamp[n];
-      for (let i = this.lo; i < this.hi; i++) {
+      const edge = (limit - g0) / gi;
+      let from = this.lo;
+      let to = this.hi;
+      if (gi > 0) {
+        if (edge >= from) from = Math.min(to, Math.floor(edge) + 1);
+        this.lit.remove(this.lo, from);
+      } else if (gi < 0) {
+        if (edge <= to - 1) to = Math.max(from, Math.ceil(edge));
+        this.lit.remove(to, this.hi);
+      } else if (g0 <= limit) {
+        this.lit.remove(from, to);
+        continue;
+      }
+      if (from >= to) continue;
+      this.partSide[this.parts] = n;
+      this.partFrom[this.parts] = from;
+      this.partTo[this.parts] = to;
+      this.partTop[this.parts++] = top;
+      this.touch(from, to);
+    }
+  }
+
+  private castStanding(sil: Silhouettes, j: number, part: number): void {
+    const { low, lit } = this;
+    const n = this.partSide[part];
+    const top = this.partTop[part];
+    const g0 = sil.far.g0[n] + sil.far.gj[n] * j;
+    const gi = sil.far.gi[n];
+    const q = -top * sil.far.gLamp[n];
+    for (let span = 0; span < lit.count; span++) {
+      const from = Math.max(this.partFrom[part], lit.from[span]);
+      const to = Math.min(this.partTo[part], lit.to[span]);
+      for (let i = from; i < to; i++) {
         const g = g0 + gi * i;
         const up = g > 0 ? top + q / g : Infinity;
         if (up > low[i]) low[i] = up;
@@ -123,26 +224,44 @@ export class RowShadows {
     }
   }
 
+  private noteHanging(k: number): void {
+    this.hanging[this.hangs] = k;
+    this.hangFrom[this.hangs] = this.lo;
+    this.hangTo[this.hangs++] = this.hi;
+    this.touch(this.lo, this.hi);
+  }
+
   /** A part with air under it hides from base/sOut to top/sIn. */
-  private castHanging(sil: Silhouettes, k: number, j: number, base: number, top: number): void {
-    const { lo, hi } = this;
-    this.reachInto(sil.far, sil.farStart[k], sil.farStart[k + 1], sil.around[k], j, top);
-    const first = sil.nearStart[k];
-    const end = sil.nearStart[k + 1];
-    this.lo = lo;
-    this.hi = hi;
-    if (first === end) {
-      for (let i = lo; i < hi; i++) this.hide(i, base, this.reach[i]);
-      return;
-    }
-    for (let n = first; n < end; n++) {
+  private castHanging(sil: Silhouettes, j: number, hang: number, z: number): void {
+    const { lit, low, high, reach } = this;
+    const k = this.hanging[hang];
+    const base = this.scene.pieces.base[k] - z;
+    const top = this.scene.pieces.top[k] - z;
+    for (let span = 0; span < lit.count; span++) {
+      const lo = Math.max(this.hangFrom[hang], lit.from[span]);
+      const hi = Math.min(this.hangTo[hang], lit.to[span]);
+      if (lo >= hi) continue;
       this.lo = lo;
       this.hi = hi;
-      this.sector(sil.near.cuts, n, first, end, j, 0);
-      const g0 = sil.near.g0[n] + sil.near.gj[n] * j;
-      const gi = sil.near.gi[n];
-      const q = -base * sil.near.gLamp[n];
-      for (let i = this.lo; i < this.hi; i++) this.hide(i, base + q / (g0 + gi * i), this.reach[i]);
+      this.reachInto(sil.far, sil.farStart[k], sil.farStart[k + 1], sil.around[k], j, top);
+      const first = sil.nearStart[k];
+      const end = sil.nearStart[k + 1];
+      if (first === end) {
+        for (let i = lo; i < hi; i++) this.hide(i, base, this.reach[i]);
+        continue;
+      }
+      for (let n = first; n < end; n++) {
+        this.lo = lo;
+        this.hi = hi;
+        this.sector(sil.near, n, first, end, j, 0);
+        const g0 = sil.near.g0[n] + sil.near.gj[n] * j;
+        const gi = sil.near.gi[n];
+        const q = -base * sil.near.gLamp[n];
+        for (let i = this.lo; i < this.hi; i++) {
+          // Once nothing is left of the tube there is nothing more to hide.
+          if (low[i] < high[i]) this.hide(i, base + q / (g0 + gi * i), reach[i]);
+        }
+      }
     }
   }
 
@@ -159,7 +278,7 @@ export class RowShadows {
     for (let n = first; n < end; n++) {
       this.lo = lo;
       this.hi = hi;
-      this.sector(far.cuts, n, first, end, j, around);
+      this.sector(far, n, first, end, j, around);
       const g0 = far.g0[n] + far.gj[n] * j;
       const gi = far.gi[n];
       const q = -top * far.gLamp[n];
@@ -170,36 +289,41 @@ export class RowShadows {
     }
   }
 
+  /** Adds a hidden stretch to a cell: joined on to what is hidden already where they meet, else in a slot of its own. */
   private hide(i: number, from: number, to: number): void {
-    if (from <= this.low[i]) {
-      if (to > this.low[i]) this.low[i] = to;
-    } else if (to >= this.high[i]) {
-      if (from < this.high[i]) this.high[i] = from;
-    } else {
-      const slot = this.count[i];
-      if (slot === SLOTS) {
-        this.retrace[i] = 1;
-        return;
-      }
-      this.from[slot * this.columns + i] = from;
-      this.to[slot * this.columns + i] = to;
-      this.count[i] = slot + 1;
+    const { low, high, columns } = this;
+    if (from <= low[i]) {
+      if (to > low[i]) low[i] = to;
+      return;
     }
+    if (to >= high[i]) {
+      if (from < high[i]) high[i] = from;
+      return;
+    }
+    const slots = this.count[i];
+    for (let slot = slots - 1; slot >= 0; slot--) {
+      const at = slot * columns + i;
+      if (to < this.from[at] || from > this.to[at]) continue;
+      if (from < this.from[at]) this.from[at] = from;
+      if (to > this.to[at]) this.to[at] = to;
+      return;
+    }
+    if (slots === SLOTS) {
+      this.retrace[i] = 1;
+      return;
+    }
+    this.from[slots * columns + i] = from;
+    this.to[slots * columns + i] = to;
+    this.count[i] = slots + 1;
   }
 
-  /** A wall hides everything but what its openings leave: sill/s to head/s. Glazing, and openings above one another, are retraced. */
+  /** A wall with openings hides everything but what they leave: sill/s to head/s. Glazing, and openings above one another, are retraced. */
   private castWall(sil: Silhouettes, k: number, j: number, z: number, v1: number): void {
     const { walls } = this.scene;
     const { lo, hi } = this;
     const { near } = sil;
     const n = sil.nearStart[this.scene.pieces.count + k];
     const g0 = near.g0[n] + near.gj[n] * j;
-    let open = 0;
-    for (let o = walls.start[k]; o < walls.start[k + 1]; o++) if (walls.transmittance[o] > 0) open++;
-    if (open === 0) {
-      this.low.fill(v1, lo, hi);
-      return;
-    }
     // `count` is still unused on this row: here it tells how many openings a cell looks through.
     for (let o = walls.start[k]; o < walls.start[k + 1]; o++) {
       if (walls.transmittance[o] === 0) continue;

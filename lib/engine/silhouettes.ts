@@ -24,14 +24,17 @@ export interface RowLines {
 /**
  * Sides of the casters, as seen from a lamp at S, in the order in which a sweep from left to right meets them.
  * `g` is the distance outside a side, linear over the grid: g = g0 + gi·i + gj·j; gLamp is its value at S. A ray from
- * a cell crosses the side at the fraction g/(g − gLamp) of its way. `cuts` hold the ray through the side's first corner.
+ * a cell crosses the side at the fraction g/(g − gLamp) of its way. `cutAt` holds, row by row, the column at which the ray
+ * through the side's first corner is met; `cutIsFrom` 1 when the side's sector begins there, 0 when it ends there.
  */
 export interface ShadowSides {
   readonly g0: Float64Array;
   readonly gi: Float64Array;
   readonly gj: Float64Array;
   readonly gLamp: Float64Array;
-  readonly cuts: RowLines;
+  readonly count: number;
+  readonly cutAt: Int32Array;
+  readonly cutIsFrom: Uint8Array;
 }
 
 /**
@@ -42,12 +45,9 @@ export interface ShadowSides {
  */
 export interface Silhouettes {
   readonly count: number;
-  /** Rows the shadow can touch: rowFrom ≤ j ≤ rowTo. */
-  readonly rowFrom: Int32Array;
-  readonly rowTo: Int32Array;
-  /** Bounds of caster k: boundStart[k] to boundStart[k+1]. */
-  readonly boundStart: Int32Array;
-  readonly bounds: RowLines;
+  /** Columns of row j in the shadow of caster k: from ≤ i < to, at j·count + k. */
+  readonly stretchFrom: Int32Array;
+  readonly stretchTo: Int32Array;
   /** Sides turned away from the lamp, which a ray from a cell meets first: farStart[k] to farStart[k+1]. */
   readonly farStart: Int32Array;
   /** Sides facing the lamp, through which it leaves; for a wall, the wall itself. */
@@ -123,13 +123,16 @@ class SideList {
     return this.g0.length;
   }
 
-  toArrays(): ShadowSides {
+  toArrays(start: readonly number[], casters: CasterRows): ShadowSides {
+    const cuts = this.cuts.toArrays();
     return {
       g0: Float64Array.from(this.g0),
       gi: Float64Array.from(this.gi),
       gj: Float64Array.from(this.gj),
       gLamp: Float64Array.from(this.gLamp),
-      cuts: this.cuts.toArrays(),
+      count: this.g0.length,
+      cutAt: cutColumns(cuts, this.frame, start, casters),
+      cutIsFrom: cuts.isFrom,
     };
   }
 }
@@ -154,8 +157,9 @@ class Cast {
   private readonly far: SideList;
   private readonly near: SideList;
   private readonly jambs: LineList;
-  private readonly rowFrom: number[] = [];
-  private readonly rowTo: number[] = [];
+  /** Rows each caster's shadow can touch: rowFrom ≤ j ≤ rowTo. */
+  readonly rowFrom: number[] = [];
+  readonly rowTo: number[] = [];
   private readonly around: number[] = [];
   private readonly boundStart = [0];
   private readonly farStart = [0];
@@ -245,18 +249,75 @@ class Cast {
   toSilhouettes(): Silhouettes {
     return {
       count: this.rowFrom.length,
-      rowFrom: Int32Array.from(this.rowFrom),
-      rowTo: Int32Array.from(this.rowTo),
-      boundStart: Int32Array.from(this.boundStart),
-      bounds: this.bounds.toArrays(),
+      ...this.stretches(this.bounds.toArrays()),
       farStart: Int32Array.from(this.farStart),
       nearStart: Int32Array.from(this.nearStart),
-      far: this.far.toArrays(),
-      near: this.near.toArrays(),
+      far: this.far.toArrays(this.farStart, this),
+      near: this.near.toArrays(this.nearStart, this),
       around: Uint8Array.from(this.around),
       jambs: this.jambs.toArrays(),
     };
   }
+
+  /** Each caster's stretch on each row: what all its bounds keep. Line by line, so that the loops are plain. */
+  private stretches(bounds: RowLines): Pick<Silhouettes, 'stretchFrom' | 'stretchTo'> {
+    const count = this.rowFrom.length;
+    const { rows, columns } = this.frame;
+    const stretchFrom = new Int32Array(rows * count);
+    const stretchTo = new Int32Array(rows * count);
+    for (let k = 0; k < count; k++) {
+      const rowTo = this.rowTo[k];
+      for (let j = this.rowFrom[k]; j <= rowTo; j++) stretchTo[j * count + k] = columns;
+      for (let b = this.boundStart[k]; b < this.boundStart[k + 1]; b++) {
+        const slope = bounds.slope[b];
+        const column = bounds.column[b];
+        const row = bounds.row[b];
+        if (bounds.isFrom[b] === 1) {
+          for (let j = this.rowFrom[k], at = j * count + k; j <= rowTo; j++, at += count) {
+            const edge = column + slope * (j - row);
+            if (edge > stretchFrom[at]) stretchFrom[at] = edge < columns ? Math.ceil(edge) : columns;
+          }
+        } else {
+          for (let j = this.rowFrom[k], at = j * count + k; j <= rowTo; j++, at += count) {
+            const edge = column + slope * (j - row);
+            if (edge < stretchTo[at] - 1) stretchTo[at] = edge < 0 ? 0 : Math.floor(edge) + 1;
+          }
+        }
+      }
+    }
+    return { stretchFrom, stretchTo };
+  }
+}
+
+interface CasterRows {
+  readonly rowFrom: readonly number[];
+  readonly rowTo: readonly number[];
+}
+
+/**
+ * The column at which each side's cut parts each row its caster's shadow can touch, row by row: the first one counted, or
+ * the first one beyond.
+ */
+function cutColumns(
+  { column, row, slope, isFrom }: RowLines,
+  { rows, columns }: GridFrame,
+  start: readonly number[],
+  { rowFrom, rowTo }: CasterRows,
+): Int32Array {
+  const count = column.length;
+  const cutAt = new Int32Array(rows * count);
+  for (let k = 0; k < rowFrom.length; k++) {
+    for (let n = start[k]; n < start[k + 1]; n++) {
+      const [at0, pivot, rise, up] = [column[n], row[n], slope[n], isFrom[n]];
+      for (let j = rowFrom[k], at = j * count + n; j <= rowTo[k]; j++, at += count) {
+        const edge = at0 + rise * (j - pivot);
+        if (edge < 0) cutAt[at] = 0;
+        else if (edge >= columns) cutAt[at] = columns;
+        else cutAt[at] = up === 1 ? Math.ceil(edge) : Math.floor(edge) + 1;
+      }
+    }
+  }
+  return cutAt;
 }
 
 /** The inside of a side as a line to be kept on: through (x, y), counted against the outward normal. */
