@@ -228,7 +228,10 @@ export function PlanEditor({
           ) : null}
         </Rail>
         <main className="flex min-w-0 flex-1 flex-col gap-2.5 p-3 sm:px-5">
-          <div className="sheet-frame relative min-h-0 flex-1 max-lg:flex-none" style={sheetProportion(extent)}>
+          <div
+            className="sheet-frame relative min-h-0 flex-1 max-lg:flex-none"
+            style={sheetProportion(extent)}
+          >
             <PlanSheet
               document={document}
               tool={tool}
