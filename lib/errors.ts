@@ -6,7 +6,7 @@ export const errorTable = {
   unauthenticated: { status: 401, title: 'Sign in first' },
   forbidden: { status: 403, title: 'Your role may not do this' },
   not_found: { status: 404, title: 'Not found' },
-  conflict: { status: 409, title: 'Someone else saved first' },
+  conflict: { status: 409, title: 'This does not fit what is there' },
   stale: { status: 412, title: 'Someone else saved first' },
   precondition_required: { status: 428, title: 'Say which version you are changing' },
   invalid: { status: 422, title: 'Some values cannot be used' },

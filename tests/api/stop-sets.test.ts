@@ -65,6 +65,22 @@ describe('a stop set', () => {
     ]);
   });
 
+  test('beyond what a room file holds is refused, so that the room can still be exported', async () => {
+    const params = { roomId: 'weights-floor' };
+    const statuses: number[] = [];
+    for (let i = 0; i < 41; i++) {
+      const { status } = await house.call('planner', 'POST /api/rooms/[roomId]/stop-sets', {
+        params,
+        body: aStopSet(`many-${i}`),
+      });
+      statuses.push(status);
+    }
+    expect(new Set(statuses)).toEqual(new Set([201, 409]));
+    const file = await house.call('crew', 'GET /api/rooms/[roomId]/file', { params });
+    expect(file.status).toBe(200);
+    expect(file.body.stopSets).toHaveLength(40);
+  });
+
   test('saved under another’s address is refused', async () => {
     const { etag } = await add('planner', aStopSet('here'));
     const answer = await house.call('planner', 'PUT /api/stop-sets/[stopSetId]', {

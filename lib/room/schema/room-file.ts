@@ -4,6 +4,9 @@ import { ceilingSchema, floorPlanSchema } from './floor-plan';
 import { name } from './primitives';
 import { stopSetSchema } from './stop-set';
 
+/** More would be no choice but a heap; a room of the database holds as many as its file. */
+export const MOST_STOP_SETS = 40;
+
 /** The open room file, version 1: metres, degrees, seconds, J/m². Unknown keys are refused with their place. */
 export const roomFileSchema = z.strictObject({
   format: z.literal('leeside-room', {
@@ -19,7 +22,7 @@ export const roomFileSchema = z.strictObject({
   }),
   floorPlan: floorPlanSchema,
   emitters: z.record(emitterKey, emitterSchema),
-  stopSets: z.array(stopSetSchema).max(40),
+  stopSets: z.array(stopSetSchema).max(MOST_STOP_SETS),
 });
 
 export type RoomFile = z.infer<typeof roomFileSchema>;

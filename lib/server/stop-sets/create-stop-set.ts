@@ -1,9 +1,10 @@
 import 'server-only';
-import { eq, max } from 'drizzle-orm';
+import { count, eq, max } from 'drizzle-orm';
 import type { Database } from '@/db/client';
 import { stopSets } from '@/db/schema';
 import { AppError } from '@/lib/errors';
 import { setReferenceFaults } from '@/lib/room/check-references';
+import { MOST_STOP_SETS } from '@/lib/room/schema/room-file';
 import type { StopSet } from '@/lib/room/schema/stop-set';
 import type { Actor } from '../actor';
 import { audit } from '../audit';
@@ -30,15 +31,20 @@ export function createStopSet(
       ]);
     refuseFaults(setReferenceFaults(set, await listEmitters(tx, actor)), 'stop set');
     const [last] = await tx
-      .select({ position: max(stopSets.position) })
+      .select({ position: max(stopSets.position), held: count() })
       .from(stopSets)
       .where(eq(stopSets.roomId, roomId));
+    if (last.held >= MOST_STOP_SETS)
+      throw new AppError(
+        'conflict',
+        `A room holds ${MOST_STOP_SETS} stop sets at most. Delete a draft first; nothing was changed.`,
+      );
     await tx.insert(stopSets).values({
       id: set.id,
       roomId,
       document: set,
       version: 1,
-      position: (last?.position ?? 0) + 1,
+      position: (last.position ?? 0) + 1,
       updatedBy: actor.userId,
       updatedAt: new Date(),
     });
