@@ -4,7 +4,7 @@ import type { FloorPlan } from './schema/floor-plan';
 import type { StopSet } from './schema/stop-set';
 import { wallFaces } from './tape';
 import { emitterOf } from './times';
-import { footprintInPlan } from './to-scene';
+import { footprintInPlan, slabOf } from './to-scene';
 
 export interface StopProblem {
   readonly stopId: string;
@@ -23,6 +23,11 @@ export function stopProblems(set: StopSet, plan: FloorPlan, emitters: Emitters):
     const [x, y] = stop.at;
     const say = (kind: StopProblem['kind'], message: string) => [{ stopId: stop.id, kind, message }];
     if (sideOf(x, y, plan.outline) !== 'inside') return say('wrong', `Stop ${stop.name} is outside the room`);
+    const inside = plan.innerWalls.find((wall) => {
+      const slab = slabOf(wall);
+      return slab !== null && sideOf(x, y, slab) !== 'outside';
+    });
+    if (inside) return say('wrong', `Stop ${stop.name} stands in the ${inside.name}`);
     const clearance = emitterOf(set, stop, emitters)?.clearance ?? 0;
     let tight: StopProblem[] = [];
     for (const piece of plan.furniture) {
