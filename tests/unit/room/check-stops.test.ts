@@ -32,6 +32,12 @@ const furnished = barePlan({
 
 describe('a stop', () => {
   test.each<[string, FloorPlan, [number, number], string]>([
+    [
+      'in an inner wall',
+      barePlan({ innerWalls: [middleWall] }),
+      [3.05, 2],
+      'wrong: Stop 1 stands in the middle',
+    ],
     ['with room to spare', furnished, [1.5, 3], 'none'],
     ['outside the room', furnished, [7, 2], 'wrong: Stop 1 is outside the room'],
     ['on the wall itself', furnished, [6, 2], 'wrong: Stop 1 is outside the room'],
