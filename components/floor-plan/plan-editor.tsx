@@ -1,14 +1,13 @@
 'use client';
 
-import { Redo2, Undo2 } from 'lucide-react';
 import { useMemo, useState } from 'react';
+import { arrowStep } from '@/components/hooks/arrow-step';
 import { useEditing } from '@/components/hooks/edit-store';
 import { useAutosave } from '@/components/hooks/use-autosave';
 import { useEditKeys } from '@/components/hooks/use-edit-keys';
 import { sheetProportion } from '@/components/sheet/proportion';
-import { DeskHeader, roomCrumbs, roomTabs } from '@/components/shell/desk-header';
+import { EditorFrame } from '@/components/shell/editor-frame';
 import { ConflictNotice } from '@/components/ui/conflict-notice';
-import { Rail, RailAction } from '@/components/ui/rail';
 import { SaveStatus } from '@/components/ui/save-status';
 import { newId } from '@/lib/client/new-id';
 import { fetchFloorPlan, importRoom, saveFloorPlan } from '@/lib/client/rooms';
@@ -148,6 +147,7 @@ export function PlanEditor({
 
   useEditKeys(editing, (event) => {
     const { key, shiftKey } = event;
+    const step = arrowStep(event);
     const low = key.toLowerCase();
     if (event.ctrlKey || event.metaKey) {
       if (low !== 'd' || !selected || !editable) return false;
@@ -174,18 +174,9 @@ export function PlanEditor({
         (value) => turnThing(value, selected, (key === '[' ? -1 : 1) * (shiftKey ? 1 : 15)),
         `turn ${selected.id}`,
       );
-    else if (selected && editable && key.startsWith('Arrow')) {
-      const by = shiftKey ? 0.01 : 0.05;
-      const way: Record<string, PlanPoint> = {
-        ArrowLeft: [-by, 0],
-        ArrowRight: [by, 0],
-        ArrowUp: [0, -by],
-        ArrowDown: [0, by],
-      };
-      const step = way[key];
-      if (!step) return false;
+    else if (selected && editable && step)
       act((value) => nudgeThing(value, selected, step), `nudge ${selected.id}`);
-    } else {
+    else {
       const next = planTools.find((it) => it.shortcut.toLowerCase() === low && usable(it.value));
       if (!next) return false;
       pickTool(next.value);
@@ -198,154 +189,132 @@ export function PlanEditor({
     : planTools.find((it) => it.value === tool)?.hint;
   const revision = resource.revision;
   return (
-    <div className="flex h-dvh flex-col max-lg:h-auto max-lg:min-h-dvh">
-      <DeskHeader
-        crumbs={roomCrumbs(room)}
-        tabs={roomTabs(room.id)}
-        status={editable ? <SaveStatus {...saving} /> : <span>Read only</span>}
-      />
-      <div className="flex min-h-0 flex-1 max-lg:flex-col">
-        <Rail
-          tools={planTools.filter((it) => usable(it.value))}
-          value={placing ? null : tool}
-          onChange={pickTool}
-        >
-          {editable ? (
-            <>
-              <RailAction
-                label="Undo"
-                icon={<Undo2 size={18} aria-hidden />}
-                disabled={!editing.canUndo}
-                onClick={editing.undo}
+    <>
+      <EditorFrame
+        room={room}
+        status={<SaveStatus {...saving} />}
+        tools={planTools.filter((it) => usable(it.value))}
+        tool={placing ? null : tool}
+        editable={editable}
+        editing={editing}
+        onTool={pickTool}
+        ledger={
+          <PlanLedger
+            room={room}
+            document={document}
+            selected={selected}
+            problems={problems}
+            editable={editable}
+            placing={placing?.piece ?? null}
+            notice={
+              <ConflictNotice
+                saving={saving}
+                what="floor plan"
+                onTakeTheirs={async () => {
+                  const theirs = await fetchFloorPlan(room.id);
+                  editing.reset(theirs.document);
+                  saving.accept(theirs.document, theirs.etag);
+                }}
+                onKeepAsCopy={
+                  document
+                    ? async () => {
+                        const copy = await importRoom(JSON.stringify(asRoomFile(room, document)));
+                        const theirs = await fetchFloorPlan(room.id);
+                        editing.reset(theirs.document);
+                        saving.accept(theirs.document, theirs.etag);
+                        window.location.assign(`/rooms/${copy.roomId}/floor-plan`);
+                      }
+                    : undefined
+                }
               />
-              <RailAction
-                label="Redo"
-                icon={<Redo2 size={18} aria-hidden />}
-                disabled={!editing.canRedo}
-                onClick={editing.redo}
-              />
-            </>
+            }
+            onSelect={setChosen}
+            onAct={act}
+            onDraw={(outcome) => {
+              if (take(outcome)) setTool('select');
+            }}
+            onPlace={(piece) => {
+              draw.cancel();
+              setTool('select');
+              setPlacing(piece && { piece, turn: null });
+            }}
+            onPut={putPiece}
+            onDuplicate={duplicate}
+            onSaveNow={() => saving.saveNow()}
+          />
+        }
+      >
+        <div className="sheet-frame relative min-h-0 flex-1 max-lg:flex-none" style={sheetProportion(extent)}>
+          <PlanSheet
+            document={document}
+            tool={tool}
+            placing={placing?.piece ?? null}
+            placingTurn={placing?.turn ?? null}
+            selected={selected}
+            editable={editable}
+            problems={problems}
+            bounds={boundsOf(extent)}
+            titleBlock={[
+              { label: 'Room', value: room.name },
+              {
+                label: 'Floor plan',
+                value: revision
+                  ? `Rev ${revision.number} · ${revision.createdAt.slice(0, 10)}`
+                  : 'No revision yet',
+              },
+              { label: 'Ceiling', value: document ? `${document.ceiling.toFixed(2)} m` : '–' },
+            ]}
+            draw={draw}
+            newId={newId}
+            onSelect={setChosen}
+            onPull={(outcome, mark) => {
+              setDragging(true);
+              take(outcome, mark);
+            }}
+            onGestureEnd={() => {
+              setDragging(false);
+              editing.endGesture();
+            }}
+            onOpening={(kind, wall, s) => {
+              if (!document) return;
+              const id = newId();
+              added({ kind: 'opening', id }, addOpening(document, id, kind, wall, s));
+            }}
+            onTouchPoint={(at, facing) => {
+              if (!document) return;
+              const id = newId();
+              const names = document.floorPlan.touchPoints.map((point) => point.name);
+              added(
+                { kind: 'touch-point', id },
+                addTouchPoint(document, id, freeName('touch point', names), at, facing),
+              );
+            }}
+            onWatchPoint={(at) => {
+              if (!document) return;
+              const id = newId();
+              const names = document.floorPlan.watchPoints.map((point) => point.name);
+              added(
+                { kind: 'watch-point', id },
+                addWatchPoint(document, id, freeName('watch point', names), at),
+              );
+            }}
+            onPiece={(piece) => {
+              setPlacing(null);
+              if (document) added({ kind: 'furniture', id: piece.id }, addPiece(document, piece));
+            }}
+          />
+          {refusal ? (
+            <p
+              role="alert"
+              className="on-sheet pointer-events-none absolute top-10 left-1/2 w-max max-w-[85%] -translate-x-1/2 rounded border border-[#c8452d] bg-[#fcfbf7] px-3 py-1.5 text-[#1e2326]"
+            >
+              {refusal}
+            </p>
           ) : null}
-        </Rail>
-        <main className="flex min-w-0 flex-1 flex-col gap-2.5 p-3 sm:px-5">
-          <div
-            className="sheet-frame relative min-h-0 flex-1 max-lg:flex-none"
-            style={sheetProportion(extent)}
-          >
-            <PlanSheet
-              document={document}
-              tool={tool}
-              placing={placing?.piece ?? null}
-              placingTurn={placing?.turn ?? null}
-              selected={selected}
-              editable={editable}
-              problems={problems}
-              bounds={boundsOf(extent)}
-              titleBlock={[
-                { label: 'Room', value: room.name },
-                {
-                  label: 'Floor plan',
-                  value: revision
-                    ? `Rev ${revision.number} · ${revision.createdAt.slice(0, 10)}`
-                    : 'No revision yet',
-                },
-                { label: 'Ceiling', value: document ? `${document.ceiling.toFixed(2)} m` : '–' },
-              ]}
-              draw={draw}
-              newId={newId}
-              onSelect={setChosen}
-              onPull={(outcome, mark) => {
-                setDragging(true);
-                take(outcome, mark);
-              }}
-              onGestureEnd={() => {
-                setDragging(false);
-                editing.endGesture();
-              }}
-              onOpening={(kind, wall, s) => {
-                if (!document) return;
-                const id = newId();
-                added({ kind: 'opening', id }, addOpening(document, id, kind, wall, s));
-              }}
-              onTouchPoint={(at, facing) => {
-                if (!document) return;
-                const id = newId();
-                const names = document.floorPlan.touchPoints.map((point) => point.name);
-                added(
-                  { kind: 'touch-point', id },
-                  addTouchPoint(document, id, freeName('touch point', names), at, facing),
-                );
-              }}
-              onWatchPoint={(at) => {
-                if (!document) return;
-                const id = newId();
-                const names = document.floorPlan.watchPoints.map((point) => point.name);
-                added(
-                  { kind: 'watch-point', id },
-                  addWatchPoint(document, id, freeName('watch point', names), at),
-                );
-              }}
-              onPiece={(piece) => {
-                setPlacing(null);
-                if (document) added({ kind: 'furniture', id: piece.id }, addPiece(document, piece));
-              }}
-            />
-            {refusal ? (
-              <p
-                role="alert"
-                className="on-sheet pointer-events-none absolute top-10 left-1/2 w-max max-w-[85%] -translate-x-1/2 rounded border border-[#c8452d] bg-[#fcfbf7] px-3 py-1.5 text-[#1e2326]"
-              >
-                {refusal}
-              </p>
-            ) : null}
-          </div>
-          <p className="min-h-[22px] text-ink-2 max-lg:text-sm">{editable ? hint : null}</p>
-        </main>
-        <PlanLedger
-          room={room}
-          document={document}
-          selected={selected}
-          problems={problems}
-          editable={editable}
-          placing={placing?.piece ?? null}
-          notice={
-            <ConflictNotice
-              saving={saving}
-              what="floor plan"
-              onTakeTheirs={async () => {
-                const theirs = await fetchFloorPlan(room.id);
-                editing.reset(theirs.document);
-                saving.accept(theirs.document, theirs.etag);
-              }}
-              onKeepAsCopy={
-                document
-                  ? async () => {
-                      const copy = await importRoom(JSON.stringify(asRoomFile(room, document)));
-                      const theirs = await fetchFloorPlan(room.id);
-                      editing.reset(theirs.document);
-                      saving.accept(theirs.document, theirs.etag);
-                      window.location.assign(`/rooms/${copy.roomId}/floor-plan`);
-                    }
-                  : undefined
-              }
-            />
-          }
-          onSelect={setChosen}
-          onAct={act}
-          onDraw={(outcome) => {
-            if (take(outcome)) setTool('select');
-          }}
-          onPlace={(piece) => {
-            draw.cancel();
-            setTool('select');
-            setPlacing(piece && { piece, turn: null });
-          }}
-          onPut={putPiece}
-          onDuplicate={duplicate}
-          onSaveNow={() => saving.saveNow()}
-        />
-      </div>
+        </div>
+        <p className="min-h-[22px] text-ink-2 max-lg:text-sm">{editable ? hint : null}</p>
+      </EditorFrame>
       <PlanKeysHelp open={helpOpen} onOpenChange={setHelpOpen} />
-    </div>
+    </>
   );
 }

@@ -1,8 +1,9 @@
 'use client';
 
+import { arrowStep } from '@/components/hooks/arrow-step';
 import type { PlanAction } from '@/lib/editor/outcome';
 import { nudgeThing, removeThing, turnThing } from '@/lib/editor/thing-actions';
-import type { FloorPlanDocument, PlanPoint } from '@/lib/room';
+import type { FloorPlanDocument } from '@/lib/room';
 import { pieceSize } from '@/lib/room/piece-size';
 import { type PlanRef, sameRef, type ThingKind } from '@/lib/room/plan-ref';
 import { placedTouchPoints } from '@/lib/room/touch-points';
@@ -101,15 +102,8 @@ export function ThingList({
   const onKey = (event: React.KeyboardEvent, ref: PlanRef) => {
     if (event.key === 'Escape') onSelect(null);
     if (!editable || event.ctrlKey || event.metaKey) return;
-    const by = event.shiftKey ? 0.01 : 0.05;
-    const moves: Record<string, PlanPoint> = {
-      ArrowLeft: [-by, 0],
-      ArrowRight: [by, 0],
-      ArrowUp: [0, -by],
-      ArrowDown: [0, by],
-    };
-    const move = moves[event.key];
-    if (move) onAct((value) => nudgeThing(value, ref, move), `nudge ${ref.id}`);
+    const step = arrowStep(event);
+    if (step) onAct((value) => nudgeThing(value, ref, step), `nudge ${ref.id}`);
     else if (event.key === '[' || event.key === ']')
       onAct(
         (value) => turnThing(value, ref, (event.key === '[' ? -1 : 1) * (event.shiftKey ? 1 : 15)),

@@ -1,5 +1,6 @@
 'use client';
 
+import { arrowStep } from '@/components/hooks/arrow-step';
 import type { StopSet } from '@/lib/room';
 import { passSeconds, pathLength } from '@/lib/room';
 import { formatDuration, formatMetres } from '@/lib/units';
@@ -21,16 +22,10 @@ export function PassTable({
   onRemove: (id: string) => void;
 }) {
   const onKey = (event: React.KeyboardEvent, id: string) => {
-    const by = event.shiftKey ? 0.01 : 0.05;
-    const moves: Record<string, [number, number]> = {
-      ArrowLeft: [-by, 0],
-      ArrowRight: [by, 0],
-      ArrowUp: [0, -by],
-      ArrowDown: [0, by],
-    };
+    const step = arrowStep(event);
     if (event.key === 'Escape') onSelect(null);
     else if (!editable) return;
-    else if (moves[event.key]) onNudge(id, ...moves[event.key]);
+    else if (step) onNudge(id, ...step);
     else if (event.key === 'Delete') onRemove(id);
     else return;
     event.preventDefault();

@@ -1,15 +1,13 @@
 'use client';
 
-import { Redo2, Undo2 } from 'lucide-react';
 import { useMemo, useState } from 'react';
 import { useEditing } from '@/components/hooks/edit-store';
 import { useAutosave } from '@/components/hooks/use-autosave';
 import { useDose } from '@/components/hooks/use-dose';
 import { useEditKeys } from '@/components/hooks/use-edit-keys';
 import { sheetProportion } from '@/components/sheet/proportion';
-import { DeskHeader, roomCrumbs, roomTabs } from '@/components/shell/desk-header';
+import { EditorFrame } from '@/components/shell/editor-frame';
 import { ConflictNotice } from '@/components/ui/conflict-notice';
-import { Rail, RailAction } from '@/components/ui/rail';
 import { SaveStatus } from '@/components/ui/save-status';
 import { newId } from '@/lib/client/new-id';
 import { fetchStopSet, saveStopSet } from '@/lib/client/stop-sets';
@@ -108,120 +106,105 @@ export function SetEditor(props: SetEditorProps) {
   });
 
   return (
-    <div className="flex h-dvh flex-col max-lg:h-auto max-lg:min-h-dvh">
-      <DeskHeader
-        crumbs={roomCrumbs(room)}
-        tabs={roomTabs(room.id)}
-        status={editable ? <SaveStatus {...saving} /> : <span>Read only</span>}
-      />
-      <div className="flex min-h-0 flex-1 max-lg:flex-col">
-        <Rail tools={tools.filter((it) => editable || !it.editing)} value={tool} onChange={pickTool}>
-          {editable ? (
-            <>
-              <RailAction
-                label="Undo"
-                icon={<Undo2 size={18} aria-hidden />}
-                disabled={!editing.canUndo}
-                onClick={editing.undo}
+    <>
+      <EditorFrame
+        room={room}
+        status={<SaveStatus {...saving} />}
+        tools={tools.filter((it) => editable || !it.editing)}
+        tool={tool}
+        editable={editable}
+        editing={editing}
+        onTool={pickTool}
+        ledger={
+          <Ledger
+            {...props}
+            set={set}
+            dose={dose}
+            surface={surface}
+            chosen={chosen}
+            chosenGap={gap}
+            notice={
+              <ConflictNotice
+                saving={saving}
+                what="stop set"
+                onTakeTheirs={async () => {
+                  const theirs = await fetchStopSet(set.id);
+                  editing.reset(theirs.stopSet);
+                  saving.accept(theirs.stopSet, theirs.etag);
+                }}
+                onKeepAsCopy={async () => {
+                  await props.onAdd(set);
+                }}
               />
-              <RailAction
-                label="Redo"
-                icon={<Redo2 size={18} aria-hidden />}
-                disabled={!editing.canRedo}
-                onClick={editing.redo}
-              />
-            </>
-          ) : null}
-        </Rail>
-        <main className="flex min-w-0 flex-1 flex-col gap-2.5 p-3 sm:px-5">
-          <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
-            <SurfacePicker
-              value={surface}
-              onChange={(next) => {
-                // Gaps and faces belong to the surface they were found on.
-                setGap(null);
-                if (chosen?.kind === 'face') setChosen(null);
-                setSurface(next);
-              }}
-            />
-            <TargetLine set={set} />
-          </div>
-          <div className="sheet-frame min-h-0 flex-1 max-lg:flex-none" style={sheetProportion(plan.outline)}>
-            <DoseSheet
-              plan={plan}
-              set={set}
-              dose={dose}
-              surface={surface}
-              tool={tool}
-              editable={editable}
-              chosen={chosen}
-              chosenGap={gap}
-              path={path}
-              titleBlock={[
-                { label: 'Room', value: room.name },
-                {
-                  label: 'Floor plan',
-                  value: revision
-                    ? `Rev ${revision.number}${revision.planVersion === planVersion ? '' : ' + changes'} · ${revision.createdAt.slice(0, 10)}`
-                    : 'No revision yet',
-                },
-                { label: 'Emitter', value: emitters[set.emitter]?.name ?? set.emitter },
-              ]}
-              onChoose={setChosen}
-              onChooseGap={chooseGap}
-              onEdit={editing.edit}
-              onGestureEnd={editing.endGesture}
-              onPointer={setPointer}
-            />
-          </div>
-          <div className="flex min-h-[22px] flex-col gap-1.5">
-            <ReadOut picture={dose.picture} at={pointer} />
-            <Legend />
-          </div>
-        </main>
-        <Ledger
-          {...props}
-          set={set}
-          dose={dose}
-          surface={surface}
-          chosen={chosen}
-          chosenGap={gap}
-          notice={
-            <ConflictNotice
-              saving={saving}
-              what="stop set"
-              onTakeTheirs={async () => {
-                const theirs = await fetchStopSet(set.id);
-                editing.reset(theirs.stopSet);
-                saving.accept(theirs.stopSet, theirs.etag);
-              }}
-              onKeepAsCopy={async () => {
-                await props.onAdd(set);
-              }}
-            />
-          }
-          onChoose={setChosen}
-          onChooseGap={chooseGap}
-          onEdit={editing.edit}
-          onNudge={(id, dx, dy) =>
-            editing.edit((value) => {
-              const stop = value.stops.find((it) => it.id === id);
-              return stop ? moveStop(value, id, [stop.at[0] + dx, stop.at[1] + dy]) : value;
-            }, `nudge ${id}`)
-          }
-          onTurnBy={(id, by) =>
-            editing.edit((value) => {
-              const stop = value.stops.find((it) => it.id === id);
-              return stop ? turnStop(value, id, stop.heading + by) : value;
-            }, `turn ${id}`)
-          }
-          onDwell={(id, seconds) => editing.edit((value) => setDwell(value, id, seconds), `dwell ${id}`)}
-          onReorder={(id, by) => editing.edit((value) => reorderStop(value, id, by))}
-          onRemove={remove}
-          onSaveNow={() => saving.saveNow()}
-        />
-      </div>
+            }
+            onChoose={setChosen}
+            onChooseGap={chooseGap}
+            onEdit={editing.edit}
+            onNudge={(id, dx, dy) =>
+              editing.edit((value) => {
+                const stop = value.stops.find((it) => it.id === id);
+                return stop ? moveStop(value, id, [stop.at[0] + dx, stop.at[1] + dy]) : value;
+              }, `nudge ${id}`)
+            }
+            onTurnBy={(id, by) =>
+              editing.edit((value) => {
+                const stop = value.stops.find((it) => it.id === id);
+                return stop ? turnStop(value, id, stop.heading + by) : value;
+              }, `turn ${id}`)
+            }
+            onDwell={(id, seconds) => editing.edit((value) => setDwell(value, id, seconds), `dwell ${id}`)}
+            onReorder={(id, by) => editing.edit((value) => reorderStop(value, id, by))}
+            onRemove={remove}
+            onSaveNow={() => saving.saveNow()}
+          />
+        }
+      >
+        <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
+          <SurfacePicker
+            value={surface}
+            onChange={(next) => {
+              // Gaps and faces belong to the surface they were found on.
+              setGap(null);
+              if (chosen?.kind === 'face') setChosen(null);
+              setSurface(next);
+            }}
+          />
+          <TargetLine set={set} />
+        </div>
+        <div className="sheet-frame min-h-0 flex-1 max-lg:flex-none" style={sheetProportion(plan.outline)}>
+          <DoseSheet
+            plan={plan}
+            set={set}
+            dose={dose}
+            surface={surface}
+            tool={tool}
+            editable={editable}
+            chosen={chosen}
+            chosenGap={gap}
+            path={path}
+            titleBlock={[
+              { label: 'Room', value: room.name },
+              {
+                label: 'Floor plan',
+                value: revision
+                  ? `Rev ${revision.number}${revision.planVersion === planVersion ? '' : ' + changes'} · ${revision.createdAt.slice(0, 10)}`
+                  : 'No revision yet',
+              },
+              { label: 'Emitter', value: emitters[set.emitter]?.name ?? set.emitter },
+            ]}
+            onChoose={setChosen}
+            onChooseGap={chooseGap}
+            onEdit={editing.edit}
+            onGestureEnd={editing.endGesture}
+            onPointer={setPointer}
+          />
+        </div>
+        <div className="flex min-h-[22px] flex-col gap-1.5">
+          <ReadOut picture={dose.picture} at={pointer} />
+          <Legend />
+        </div>
+      </EditorFrame>
       <KeysHelp open={helpOpen} onOpenChange={setHelpOpen} />
-    </div>
+    </>
   );
 }

@@ -1,6 +1,7 @@
 'use client';
 
 import { ChevronDown, ChevronUp } from 'lucide-react';
+import { arrowStep } from '@/components/hooks/arrow-step';
 import { type FloorPlan, type StopSet, tapesTo } from '@/lib/room';
 import { formatDuration, formatMetres } from '@/lib/units';
 
@@ -30,17 +31,11 @@ export function StopTable({
   onRemove: (id: string) => void;
 }) {
   const onKey = (event: React.KeyboardEvent, id: string) => {
-    const by = event.shiftKey ? 0.01 : 0.05;
-    const moves: Record<string, [number, number]> = {
-      ArrowLeft: [-by, 0],
-      ArrowRight: [by, 0],
-      ArrowUp: [0, -by],
-      ArrowDown: [0, by],
-    };
+    const step = arrowStep(event);
     const { key } = event;
     if (key === 'Escape') onSelect(null);
     else if (!editable) return;
-    else if (moves[key]) onNudge(id, ...moves[key]);
+    else if (step) onNudge(id, ...step);
     else if (key === '[' || key === ']') onTurn(id, key === '[' ? -5 : 5);
     else if (key === 'Delete') onRemove(id);
     else return;
