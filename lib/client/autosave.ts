@@ -17,6 +17,9 @@ export interface SaveStanding {
  */
 export type Save<T> = (value: T, etag: string) => Promise<{ etag: string }>;
 
+/** What the server holds when an answer was lost: nobody here can say. */
+const UNKNOWN = Symbol('unknown');
+
 const underWay = new Set<Promise<unknown>>();
 
 /** Resolves when every save that is under way has been answered: what is loaded after it is not older. */
@@ -32,9 +35,9 @@ export async function savesAnswered(): Promise<void> {
  */
 export class Autosaver<T> {
   private current: T;
-  private saved: T;
+  private saved: T | typeof UNKNOWN;
   private standing: SaveStanding = { state: 'saved', savedAt: null, message: null, winner: null };
-  /** Was sent, and the line broke before the answer: nobody here knows whether the server has it. */
+  /** Was sent, and the line broke before the answer: sent again before anything else. */
   private inDoubt: { readonly value: T } | null = null;
   private running: Promise<boolean> | null = null;
   private timer: ReturnType<typeof setTimeout> | undefined;
@@ -59,7 +62,7 @@ export class Autosaver<T> {
   readonly getStanding = (): SaveStanding => this.standing;
 
   get hasUnsaved(): boolean {
-    return this.current !== this.saved || this.inDoubt !== null;
+    return this.current !== this.saved;
   }
 
   /** Takes the newest value and saves it after a pause. In a conflict it only keeps it: the person decides. */
@@ -103,7 +106,9 @@ export class Autosaver<T> {
         this.saved = sending;
         this.inDoubt = null;
       } catch (error) {
-        this.inDoubt = error instanceof AppError ? null : { value: sending };
+        const refused = error instanceof AppError;
+        this.inDoubt = refused ? null : { value: sending };
+        if (!refused) this.saved = UNKNOWN;
         this.refuse(error);
         // What was refused is not what is on the desk any more: that is for the server to judge.
         if (this.standing.state === 'error' && sending !== this.current) continue;
