@@ -84,19 +84,24 @@ function lightRun(
   if (touching >= first && touching < end && Math.abs(dx0 + touching * step) <= EDGE) {
     // A cell whose centre touches the tube is read beside it.
     shadows.lit.remove(touching, touching + 1);
+    shadows.open.remove(touching, touching + 1);
     if (mask[start + touching] !== 0)
       out[start + touching] += traceCell(tracer, tube, originX + (touching + 0.5) * step, y, z);
   }
 
   const half = tube.strength / 2;
-  const { lit, touchedFrom, touchedTo } = shadows;
+  const { lit, open } = shadows;
+  for (let span = 0; span < open.count; span++)
+    openRun(mask, out, start, open.from[span], open.to[span], dx0, step, dy, v0, v1, half);
+  // Between the open stretches, in the lit ones, something hides part of the tube.
+  let next = 0;
   for (let span = 0; span < lit.count; span++) {
-    const from = lit.from[span];
-    const to = lit.to[span];
-    openRun(mask, out, start, from, Math.min(to, touchedFrom), dx0, step, dy, v0, v1, half);
-    openRun(mask, out, start, Math.max(from, touchedFrom, touchedTo), to, dx0, step, dy, v0, v1, half);
-    const last = Math.min(to, touchedTo);
-    for (let i = Math.max(from, touchedFrom); i < last; i++) {
+    for (let i = lit.from[span]; i < lit.to[span]; i++) {
+      while (next < open.count && open.to[next] <= i) next++;
+      if (next < open.count && open.from[next] <= i) {
+        i = open.to[next] - 1;
+        continue;
+      }
       if (mask[start + i] === 0) continue;
       if (shadows.retrace[i] === 1)
         out[start + i] += traceCell(tracer, tube, originX + (i + 0.5) * step, y, z);

@@ -19,19 +19,21 @@ export class RowShadows {
   readonly retrace: Uint8Array;
   /** Columns that any light may reach; the rest of the row is dark. */
   readonly lit: LitSpans;
+  /** Lit columns that nothing touches: the whole tube is seen from them. */
+  readonly open: LitSpans;
   /** Columns that anything touched: touchedFrom ≤ i < touchedTo. Beside them the arrays above hold nothing. */
   touchedFrom = 0;
   touchedTo = 0;
 
-  private readonly reach: Float64Array;
   /** Stretches of standing parts that hide some of the tube: far side, from column, to column. */
   private readonly partSide: Int32Array;
   private readonly partFrom: Int32Array;
   private readonly partTo: Int32Array;
   private readonly partTop: Float64Array;
   private parts = 0;
-  /** Hanging parts whose shadow meets the row, with their stretches. */
+  /** Stretches of hanging parts: the part, its near side (−1 for none), from column, to column. */
   private readonly hanging: Int32Array;
+  private readonly hangSide: Int32Array;
   private readonly hangFrom: Int32Array;
   private readonly hangTo: Int32Array;
   private hangs = 0;
@@ -48,17 +50,18 @@ export class RowShadows {
     this.from = new Float64Array(columns * SLOTS);
     this.to = new Float64Array(columns * SLOTS);
     this.retrace = new Uint8Array(columns);
-    this.reach = new Float64Array(columns);
     this.lit = new LitSpans(columns);
+    this.open = new LitSpans(columns);
     const { pieces } = scene;
     const sides = pieces.start[pieces.count];
     this.partSide = new Int32Array(sides);
     this.partFrom = new Int32Array(sides);
     this.partTo = new Int32Array(sides);
     this.partTop = new Float64Array(sides);
-    this.hanging = new Int32Array(pieces.count);
-    this.hangFrom = new Int32Array(pieces.count);
-    this.hangTo = new Int32Array(pieces.count);
+    this.hanging = new Int32Array(sides + pieces.count);
+    this.hangSide = new Int32Array(sides + pieces.count);
+    this.hangFrom = new Int32Array(sides + pieces.count);
+    this.hangTo = new Int32Array(sides + pieces.count);
   }
 
   /**
@@ -68,6 +71,7 @@ export class RowShadows {
   cast(sil: Silhouettes, j: number, first: number, end: number, z: number, v0: number, v1: number): void {
     const { pieces, walls } = this.scene;
     this.lit.reset(first, end);
+    this.open.reset(first, end);
     this.touchedFrom = end;
     this.touchedTo = first;
     this.parts = 0;
@@ -76,7 +80,7 @@ export class RowShadows {
     for (let k = 0; k < walls.count; k++) {
       if (!this.stretch(sil, pieces.count + k, j, first, end)) continue;
       if (this.letsThrough(k)) windows++;
-      else this.lit.remove(this.lo, this.hi);
+      else this.darken(this.lo, this.hi);
     }
     for (let k = 0; k < pieces.count; k++) {
       const base = pieces.base[k] - z;
@@ -84,7 +88,7 @@ export class RowShadows {
       if (base >= v1 || top <= 0) continue;
       if (!this.stretch(sil, k, j, first, end)) continue;
       if (base <= 0) this.sortStanding(sil, k, j, top, v1);
-      else this.noteHanging(k);
+      else this.sortHanging(sil, k, j, base, v1);
     }
     if (windows > 0) {
       this.touch(first, end);
@@ -99,7 +103,13 @@ export class RowShadows {
     for (let n = 0; n < this.hangs; n++) this.castHanging(sil, j, n, z);
   }
 
+  private darken(lo: number, hi: number): void {
+    this.lit.remove(lo, hi);
+    this.open.remove(lo, hi);
+  }
+
   private touch(lo: number, hi: number): void {
+    this.open.remove(lo, hi);
     if (lo < this.touchedFrom) this.touchedFrom = lo;
     if (hi > this.touchedTo) this.touchedTo = hi;
   }
@@ -177,7 +187,7 @@ export class RowShadows {
       this.sector(sil.far, n, first, end, j, sil.around[k]);
       if (this.lo >= this.hi) continue;
       if (top >= v1) {
-        this.lit.remove(this.lo, this.hi);
+        this.darken(this.lo, this.hi);
         continue;
       }
       // Dark where g ≤ limit: top + q/g ≥ v1.
@@ -189,12 +199,12 @@ export class RowShadows {
       let to = this.hi;
       if (gi > 0) {
         if (edge >= from) from = Math.min(to, Math.floor(edge) + 1);
-        this.lit.remove(this.lo, from);
+        this.darken(this.lo, from);
       } else if (gi < 0) {
         if (edge <= to - 1) to = Math.max(from, Math.ceil(edge));
-        this.lit.remove(to, this.hi);
+        this.darken(to, this.hi);
       } else if (g0 <= limit) {
-        this.lit.remove(from, to);
+        this.darken(from, to);
         continue;
       }
       if (from >= to) continue;
@@ -224,67 +234,70 @@ export class RowShadows {
     }
   }
 
-  private noteHanging(k: number): void {
-    this.hanging[this.hangs] = k;
-    this.hangFrom[this.hangs] = this.lo;
-    this.hangTo[this.hangs++] = this.hi;
-    this.touch(this.lo, this.hi);
-  }
-
-  /** A part with air under it hides from base/sOut to top/sIn. */
-  private castHanging(sil: Silhouettes, j: number, hang: number, z: number): void {
-    const { lit, low, high, reach } = this;
-    const k = this.hanging[hang];
-    const base = this.scene.pieces.base[k] - z;
-    const top = this.scene.pieces.top[k] - z;
-    for (let span = 0; span < lit.count; span++) {
-      const lo = Math.max(this.hangFrom[hang], lit.from[span]);
-      const hi = Math.min(this.hangTo[hang], lit.to[span]);
-      if (lo >= hi) continue;
-      this.lo = lo;
-      this.hi = hi;
-      this.reachInto(sil.far, sil.farStart[k], sil.farStart[k + 1], sil.around[k], j, top);
-      const first = sil.nearStart[k];
-      const end = sil.nearStart[k + 1];
-      if (first === end) {
-        for (let i = lo; i < hi; i++) this.hide(i, base, this.reach[i]);
-        continue;
-      }
-      for (let n = first; n < end; n++) {
-        this.lo = lo;
-        this.hi = hi;
-        this.sector(sil.near, n, first, end, j, 0);
-        const g0 = sil.near.g0[n] + sil.near.gj[n] * j;
-        const gi = sil.near.gi[n];
-        const q = -base * sil.near.gLamp[n];
-        for (let i = this.lo; i < this.hi; i++) {
-          // Once nothing is left of the tube there is nothing more to hide.
-          if (low[i] < high[i]) this.hide(i, base + q / (g0 + gi * i), reach[i]);
-        }
-      }
-    }
-  }
-
-  /** Fills `reach` with top/sIn over lo..hi. */
-  private reachInto(
-    far: ShadowSides,
-    first: number,
-    end: number,
-    around: number,
-    j: number,
-    top: number,
-  ): void {
-    const { lo, hi, reach } = this;
+  /**
+   * A part with air under it hides from base/sOut to top/sIn. Where base/sOut is past the tube's upper end it hides
+   * nothing: base + q/g < v1, with g < 0 behind a near side, keeps one end of that side's stretch.
+   */
+  private sortHanging(sil: Silhouettes, k: number, j: number, base: number, v1: number): void {
+    const { lo, hi } = this;
+    const first = sil.nearStart[k];
+    const end = sil.nearStart[k + 1];
+    if (first === end) this.noteHanging(k, -1, lo, hi);
     for (let n = first; n < end; n++) {
       this.lo = lo;
       this.hi = hi;
-      this.sector(far, n, first, end, j, around);
-      const g0 = far.g0[n] + far.gj[n] * j;
-      const gi = far.gi[n];
-      const q = -top * far.gLamp[n];
-      for (let i = this.lo; i < this.hi; i++) {
-        const g = g0 + gi * i;
-        reach[i] = g > 0 ? top + q / g : Infinity;
+      this.sector(sil.near, n, first, end, j, 0);
+      const limit = (-base * sil.near.gLamp[n]) / (v1 - base);
+      const g0 = sil.near.g0[n] + sil.near.gj[n] * j;
+      const gi = sil.near.gi[n];
+      const edge = (limit - g0) / gi;
+      let from = this.lo;
+      let to = this.hi;
+      // Rounding must not cut a cell that is touched: one more is kept, and hides nothing.
+      if (gi > 0) {
+        if (edge < to - 2) to = Math.max(from, Math.ceil(edge) + 2);
+      } else if (gi < 0) {
+        if (edge > from + 1) from = Math.min(to, Math.floor(edge) - 1);
+      }
+      if (from < to) this.noteHanging(k, n, from, to);
+    }
+  }
+
+  private noteHanging(k: number, side: number, from: number, to: number): void {
+    this.hanging[this.hangs] = k;
+    this.hangSide[this.hangs] = side;
+    this.hangFrom[this.hangs] = from;
+    this.hangTo[this.hangs++] = to;
+    this.touch(from, to);
+  }
+
+  private castHanging(sil: Silhouettes, j: number, hang: number, z: number): void {
+    const { lit, low, high } = this;
+    const { far, near } = sil;
+    const k = this.hanging[hang];
+    const base = this.scene.pieces.base[k] - z;
+    const top = this.scene.pieces.top[k] - z;
+    const side = this.hangSide[hang];
+    const n0 = side < 0 ? 1 : near.g0[side] + near.gj[side] * j;
+    const ni = side < 0 ? 0 : near.gi[side];
+    const nq = side < 0 ? 0 : -base * near.gLamp[side];
+    for (let m = sil.farStart[k]; m < sil.farStart[k + 1]; m++) {
+      this.lo = this.hangFrom[hang];
+      this.hi = this.hangTo[hang];
+      this.sector(far, m, sil.farStart[k], sil.farStart[k + 1], j, sil.around[k]);
+      if (this.lo >= this.hi) continue;
+      const f0 = far.g0[m] + far.gj[m] * j;
+      const fi = far.gi[m];
+      const fq = -top * far.gLamp[m];
+      for (let span = 0; span < lit.count; span++) {
+        const from = Math.max(this.lo, lit.from[span]);
+        const to = Math.min(this.hi, lit.to[span]);
+        for (let i = from; i < to; i++) {
+          // Once nothing is left of the tube there is nothing more to hide.
+          if (low[i] >= high[i]) continue;
+          const g = f0 + fi * i;
+          this.hide(i, base + nq / (n0 + ni * i), g > 0 ? top + fq / g : Infinity);
+        }
       }
     }
   }
@@ -292,12 +305,13 @@ export class RowShadows {
   /** Adds a hidden stretch to a cell: joined on to what is hidden already where they meet, else in a slot of its own. */
   private hide(i: number, from: number, to: number): void {
     const { low, high, columns } = this;
+    if (to <= low[i] || from >= high[i]) return;
     if (from <= low[i]) {
-      if (to > low[i]) low[i] = to;
+      low[i] = to;
       return;
     }
     if (to >= high[i]) {
-      if (from < high[i]) high[i] = from;
+      high[i] = from;
       return;
     }
     const slots = this.count[i];
