@@ -1,3 +1,4 @@
+import { EDGE } from '@/lib/geometry/degenerate';
 import { LitSpans } from './lit-spans';
 import type { PreparedScene } from './prepare-scene';
 import type { RowLines, ShadowSides, Silhouettes } from './silhouettes';
@@ -87,7 +88,8 @@ export class RowShadows {
       const top = pieces.top[k] - z;
       if (base >= v1 || top <= 0) continue;
       if (!this.stretch(sil, k, j, first, end)) continue;
-      if (base <= 0) this.sortStanding(sil, k, j, top, v1);
+      // Parts are drawn in by a skin: what stands on the surface is that much above it.
+      if (base <= EDGE) this.sortStanding(sil, k, j, top, v1);
       else this.sortHanging(sil, k, j, base, v1);
     }
     if (windows > 0) {
