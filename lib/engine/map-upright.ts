@@ -96,39 +96,52 @@ function lightRun(
   // Between the open stretches, in the lit ones, something hides part of the tube.
   let next = 0;
   for (let span = 0; span < lit.count; span++) {
-    for (let i = lit.from[span]; i < lit.to[span]; i++) {
+    const end = lit.to[span];
+    for (let i = lit.from[span]; i < end; ) {
       while (next < open.count && open.to[next] <= i) next++;
-      if (next < open.count && open.from[next] <= i) {
-        i = open.to[next] - 1;
-        continue;
-      }
-      if (mask[start + i] === 0) continue;
-      if (shadows.retrace[i] === 1)
-        out[start + i] += traceCell(tracer, tube, originX + (i + 0.5) * step, y, z);
-      else out[start + i] += partlyLit(shadows, i, columns, dx0 + i * step, dy, half, MERGE * tube.length);
+      const opens = next < open.count && open.from[next] < end ? open.from[next] : end;
+      if (i < opens) partRun(tracer, tube, surface, shadows, j, i, opens, dx0, dy, z, out);
+      i = opens < end ? open.to[next] : end;
     }
   }
 }
 
-/** What a cell gets of the tube between its `low` and `high`, less what is hidden in between. */
-function partlyLit(
+/** The columns first ≤ i < end of row j, each of which sees a part of the tube or none. */
+function partRun(
+  tracer: Tracer,
+  tube: PlacedTube,
+  { columns, step, originX, originY, mask }: GridSurface,
   shadows: RowShadows,
-  i: number,
-  columns: number,
-  dx: number,
+  j: number,
+  first: number,
+  end: number,
+  dx0: number,
   dy: number,
-  half: number,
-  least: number,
-): number {
-  const low = shadows.low[i];
-  const high = shadows.high[i];
-  if (low + least >= high) return 0;
-  const d2 = dx * dx + dy * dy;
-  const a = low * low;
-  const b = high * high;
-  let sum = (b - a) / ((d2 + a) * (d2 + b));
-  if (shadows.count[i] > 0) sum -= hiddenBetween(shadows, i, columns, d2, least);
-  return half * Math.sqrt(d2) * sum;
+  z: number,
+  out: Float32Array,
+): void {
+  const { low, high, count, retrace } = shadows;
+  const half = tube.strength / 2;
+  const least = MERGE * tube.length;
+  const start = j * columns;
+  const dy2 = dy * dy;
+  for (let i = first; i < end; i++) {
+    if (mask[start + i] === 0) continue;
+    if (retrace[i] === 1) {
+      out[start + i] += traceCell(tracer, tube, originX + (i + 0.5) * step, originY + (j + 0.5) * step, z);
+      continue;
+    }
+    const from = low[i];
+    const to = high[i];
+    if (from + least >= to) continue;
+    const dx = dx0 + i * step;
+    const d2 = dx * dx + dy2;
+    const a = from * from;
+    const b = to * to;
+    let sum = (b - a) / ((d2 + a) * (d2 + b));
+    if (count[i] > 0) sum -= hiddenBetween(shadows, i, columns, d2, least);
+    out[start + i] += half * Math.sqrt(d2) * sum;
+  }
 }
 
 /** The open field: no shadow, no look-up, no branch but the mask. */

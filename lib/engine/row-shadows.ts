@@ -83,11 +83,14 @@ export class RowShadows {
       if (this.letsThrough(k)) windows++;
       else this.darken(this.lo, this.hi);
     }
-    for (let k = 0; k < pieces.count; k++) {
+    const { stretchFrom, stretchTo } = sil;
+    for (let k = 0, at = j * sil.count; k < pieces.count; k++, at++) {
+      // Most shadows miss most rows: nothing is called for those.
+      if (stretchFrom[at] >= stretchTo[at] || stretchTo[at] <= first || stretchFrom[at] >= end) continue;
       const base = pieces.base[k] - z;
       const top = pieces.top[k] - z;
-      if (base >= v1 || top <= 0) continue;
-      if (!this.stretch(sil, k, j, first, end)) continue;
+      if (base >= v1 || top <= 0 || !this.stretch(sil, k, j, first, end)) continue;
+      if (!this.lit.meets(this.lo, this.hi)) continue;
       // Parts are drawn in by a skin: what stands on the surface is that much above it.
       if (base <= EDGE) this.sortStanding(sil, k, j, top, v1);
       else this.sortHanging(sil, k, j, base, v1);

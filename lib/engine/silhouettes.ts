@@ -86,10 +86,10 @@ class LineList {
 
   toArrays(): RowLines {
     return {
-      column: Float64Array.from(this.column),
-      row: Float64Array.from(this.row),
-      slope: Float64Array.from(this.slope),
-      isFrom: Uint8Array.from(this.isFrom),
+      column: new Float64Array(this.column),
+      row: new Float64Array(this.row),
+      slope: new Float64Array(this.slope),
+      isFrom: new Uint8Array(this.isFrom),
     };
   }
 }
@@ -126,10 +126,10 @@ class SideList {
   toArrays(start: readonly number[], casters: CasterRows): ShadowSides {
     const cuts = this.cuts.toArrays();
     return {
-      g0: Float64Array.from(this.g0),
-      gi: Float64Array.from(this.gi),
-      gj: Float64Array.from(this.gj),
-      gLamp: Float64Array.from(this.gLamp),
+      g0: new Float64Array(this.g0),
+      gi: new Float64Array(this.gi),
+      gj: new Float64Array(this.gj),
+      gLamp: new Float64Array(this.gLamp),
       count: this.g0.length,
       cutAt: cutColumns(cuts, this.frame, start, casters),
       cutIsFrom: cuts.isFrom,
@@ -160,7 +160,7 @@ class Cast {
   /** Rows each caster's shadow can touch: rowFrom ≤ j ≤ rowTo. */
   readonly rowFrom: number[] = [];
   readonly rowTo: number[] = [];
-  private readonly around: number[] = [];
+  readonly around: number[] = [];
   private readonly boundStart = [0];
   private readonly farStart = [0];
   private readonly nearStart = [0];
@@ -250,11 +250,11 @@ class Cast {
     return {
       count: this.rowFrom.length,
       ...this.stretches(this.bounds.toArrays()),
-      farStart: Int32Array.from(this.farStart),
-      nearStart: Int32Array.from(this.nearStart),
+      farStart: new Int32Array(this.farStart),
+      nearStart: new Int32Array(this.nearStart),
       far: this.far.toArrays(this.farStart, this),
       near: this.near.toArrays(this.nearStart, this),
-      around: Uint8Array.from(this.around),
+      around: new Uint8Array(this.around),
       jambs: this.jambs.toArrays(),
     };
   }
@@ -292,6 +292,7 @@ class Cast {
 interface CasterRows {
   readonly rowFrom: readonly number[];
   readonly rowTo: readonly number[];
+  readonly around: readonly number[];
 }
 
 /**
@@ -302,13 +303,17 @@ function cutColumns(
   { column, row, slope, isFrom }: RowLines,
   { rows, columns }: GridFrame,
   start: readonly number[],
-  { rowFrom, rowTo }: CasterRows,
+  { rowFrom, rowTo, around }: CasterRows,
 ): Int32Array {
   const count = column.length;
   const cutAt = new Int32Array(rows * count);
   for (let k = 0; k < rowFrom.length; k++) {
-    for (let n = start[k]; n < start[k + 1]; n++) {
-      const [at0, pivot, rise, up] = [column[n], row[n], slope[n], isFrom[n]];
+    // Where the sectors do not go all the way round, nothing is cut before the first.
+    for (let n = start[k] + (around[k] === 1 ? 0 : 1); n < start[k + 1]; n++) {
+      const at0 = column[n];
+      const pivot = row[n];
+      const rise = slope[n];
+      const up = isFrom[n];
       for (let j = rowFrom[k], at = j * count + n; j <= rowTo[k]; j++, at += count) {
         const edge = at0 + rise * (j - pivot);
         if (edge < 0) cutAt[at] = 0;
