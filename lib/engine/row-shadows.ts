@@ -7,6 +7,41 @@ import type { RowLines, ShadowSides, Silhouettes } from './silhouettes';
 export const SLOTS = 6;
 
 /**
+ * Where the sector of side n, in a chain first ≤ n < end, begins on a row, not before `lo`. Each side's cut begins its
+ * sector and ends the one before; going all the way round, the first follows the last.
+ */
+function sectorFrom(
+  sides: ShadowSides,
+  row: number,
+  n: number,
+  first: number,
+  end: number,
+  around: number,
+  lo: number,
+): number {
+  const { cutAt, cutIsFrom } = sides;
+  if ((n > first || around === 1) && cutIsFrom[n] === 1 && cutAt[row + n] > lo) lo = cutAt[row + n];
+  const next = n < end - 1 ? n + 1 : around === 1 ? first : -1;
+  return next >= 0 && cutIsFrom[next] === 0 && cutAt[row + next] > lo ? cutAt[row + next] : lo;
+}
+
+/** Where it ends, not past `hi`. */
+function sectorTo(
+  sides: ShadowSides,
+  row: number,
+  n: number,
+  first: number,
+  end: number,
+  around: number,
+  hi: number,
+): number {
+  const { cutAt, cutIsFrom } = sides;
+  if ((n > first || around === 1) && cutIsFrom[n] === 0 && cutAt[row + n] < hi) hi = cutAt[row + n];
+  const next = n < end - 1 ? n + 1 : around === 1 ? first : -1;
+  return next >= 0 && cutIsFrom[next] === 1 && cutAt[row + next] < hi ? cutAt[row + next] : hi;
+}
+
+/**
  * What hides an upright tube from the cells of one grid row, as heights above the surface (metres).
  * Light comes from low..high, less `count` stretches in between; `retrace` marks cells to be traced on their own.
  */
@@ -84,7 +119,9 @@ export class RowShadows {
       else this.darken(this.lo, this.hi);
     }
     const { stretchFrom, stretchTo } = sil;
-    for (let k = 0, at = j * sil.count; k < pieces.count; k++, at++) {
+    for (let n = 0; n < pieces.count; n++) {
+      const k = sil.nearestFirst[n];
+      const at = j * sil.count + k;
       // Most shadows miss most rows: nothing is called for those.
       if (stretchFrom[at] >= stretchTo[at] || stretchTo[at] <= first || stretchFrom[at] >= end) continue;
       const base = pieces.base[k] - z;
@@ -120,11 +157,15 @@ export class RowShadows {
   }
 
   private clear(from: number, to: number, v0: number, v1: number): void {
-    if (from >= to) return;
-    this.low.fill(v0, from, to);
-    this.high.fill(v1, from, to);
-    this.count.fill(0, from, to);
-    this.retrace.fill(0, from, to);
+    for (let n = 0; n < this.lit.count; n++) {
+      const lo = Math.max(from, this.lit.from[n]);
+      const hi = Math.min(to, this.lit.to[n]);
+      if (lo >= hi) continue;
+      this.low.fill(v0, lo, hi);
+      this.high.fill(v1, lo, hi);
+      this.count.fill(0, lo, hi);
+      this.retrace.fill(0, lo, hi);
+    }
   }
 
   private letsThrough(wall: number): boolean {
@@ -159,24 +200,6 @@ export class RowShadows {
     } else if (at >= this.lo) this.lo = Math.floor(at) + 1;
   }
 
-  /** Narrows lo..hi to the sector of side n in a chain first ≤ n < end. */
-  private sector(sides: ShadowSides, n: number, first: number, end: number, j: number, around: number): void {
-    const { cutAt, cutIsFrom } = sides;
-    const row = j * sides.count;
-    if (n > first || around === 1) {
-      const at = cutAt[row + n];
-      if (cutIsFrom[n] === 1) {
-        if (at > this.lo) this.lo = at;
-      } else if (at < this.hi) this.hi = at;
-    }
-    const next = n < end - 1 ? n + 1 : around === 1 ? first : -1;
-    if (next < 0) return;
-    const at = cutAt[row + next];
-    if (cutIsFrom[next] === 1) {
-      if (at < this.hi) this.hi = at;
-    } else if (at > this.lo) this.lo = at;
-  }
-
   /**
    * A part standing on the surface hides the tube up to top/s, s the fraction of the way at which the ray enters it:
    * top·(1 − gLamp/g). A cell inside the footprint sees nothing. What reaches v1 is dark: as g is linear along the row,
@@ -186,13 +209,13 @@ export class RowShadows {
     const { lo, hi } = this;
     const first = sil.farStart[k];
     const end = sil.farStart[k + 1];
+    const row = j * sil.far.count;
     for (let n = first; n < end; n++) {
-      this.lo = lo;
-      this.hi = hi;
-      this.sector(sil.far, n, first, end, j, sil.around[k]);
-      if (this.lo >= this.hi) continue;
+      let from = sectorFrom(sil.far, row, n, first, end, sil.around[k], lo);
+      let to = sectorTo(sil.far, row, n, first, end, sil.around[k], hi);
+      if (from >= to) continue;
       if (top >= v1) {
-        this.darken(this.lo, this.hi);
+        this.darken(from, to);
         continue;
       }
       // Dark where g ≤ limit: top + q/g ≥ v1.
@@ -200,14 +223,18 @@ export class RowShadows {
       const g0 = sil.far.g0[n] + sil.far.gj[n] * j;
       const gi = sil.far.gi[n];
       const edge = (limit - g0) / gi;
-      let from = this.lo;
-      let to = this.hi;
       if (gi > 0) {
-        if (edge >= from) from = Math.min(to, Math.floor(edge) + 1);
-        this.darken(this.lo, from);
+        if (edge >= from) {
+          const beyond = Math.min(to, Math.floor(edge) + 1);
+          this.darken(from, beyond);
+          from = beyond;
+        }
       } else if (gi < 0) {
-        if (edge <= to - 1) to = Math.max(from, Math.ceil(edge));
-        this.darken(to, this.hi);
+        if (edge <= to - 1) {
+          const before = Math.max(from, Math.ceil(edge));
+          this.darken(before, to);
+          to = before;
+        }
       } else if (g0 <= limit) {
         this.darken(from, to);
         continue;
@@ -232,8 +259,8 @@ export class RowShadows {
       const from = Math.max(this.partFrom[part], lit.from[span]);
       const to = Math.min(this.partTo[part], lit.to[span]);
       for (let i = from; i < to; i++) {
-        const g = g0 + gi * i;
-        const up = g > 0 ? top + q / g : Infinity;
+        // Not dark, so g > 0: the cell lies beyond the part.
+        const up = top + q / (g0 + gi * i);
         if (up > low[i]) low[i] = up;
       }
     }
@@ -248,16 +275,15 @@ export class RowShadows {
     const first = sil.nearStart[k];
     const end = sil.nearStart[k + 1];
     if (first === end) this.noteHanging(k, -1, lo, hi);
+    const row = j * sil.near.count;
     for (let n = first; n < end; n++) {
-      this.lo = lo;
-      this.hi = hi;
-      this.sector(sil.near, n, first, end, j, 0);
+      let from = sectorFrom(sil.near, row, n, first, end, 0, lo);
+      let to = sectorTo(sil.near, row, n, first, end, 0, hi);
+      if (from >= to) continue;
       const limit = (-base * sil.near.gLamp[n]) / (v1 - base);
       const g0 = sil.near.g0[n] + sil.near.gj[n] * j;
       const gi = sil.near.gi[n];
       const edge = (limit - g0) / gi;
-      let from = this.lo;
-      let to = this.hi;
       // Rounding must not cut a cell that is touched: one more is kept, and hides nothing.
       if (gi > 0) {
         if (edge < to - 2) to = Math.max(from, Math.ceil(edge) + 2);
@@ -286,17 +312,19 @@ export class RowShadows {
     const n0 = side < 0 ? 1 : near.g0[side] + near.gj[side] * j;
     const ni = side < 0 ? 0 : near.gi[side];
     const nq = side < 0 ? 0 : -base * near.gLamp[side];
-    for (let m = sil.farStart[k]; m < sil.farStart[k + 1]; m++) {
-      this.lo = this.hangFrom[hang];
-      this.hi = this.hangTo[hang];
-      this.sector(far, m, sil.farStart[k], sil.farStart[k + 1], j, sil.around[k]);
-      if (this.lo >= this.hi) continue;
+    const first = sil.farStart[k];
+    const end = sil.farStart[k + 1];
+    const row = j * far.count;
+    for (let m = first; m < end; m++) {
+      const sectorLo = sectorFrom(far, row, m, first, end, sil.around[k], this.hangFrom[hang]);
+      const sectorHi = sectorTo(far, row, m, first, end, sil.around[k], this.hangTo[hang]);
+      if (sectorLo >= sectorHi) continue;
       const f0 = far.g0[m] + far.gj[m] * j;
       const fi = far.gi[m];
       const fq = -top * far.gLamp[m];
       for (let span = 0; span < lit.count; span++) {
-        const from = Math.max(this.lo, lit.from[span]);
-        const to = Math.min(this.hi, lit.to[span]);
+        const from = Math.max(sectorLo, lit.from[span]);
+        const to = Math.min(sectorHi, lit.to[span]);
         for (let i = from; i < to; i++) {
           // Once nothing is left of the tube there is nothing more to hide.
           if (low[i] >= high[i]) continue;

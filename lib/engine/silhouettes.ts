@@ -45,6 +45,8 @@ export interface ShadowSides {
  */
 export interface Silhouettes {
   readonly count: number;
+  /** The pieces from the nearest to S to the farthest: near shadows swallow far ones. */
+  readonly nearestFirst: Int32Array;
   /** Columns of row j in the shadow of caster k: from ≤ i < to, at j·count + k. */
   readonly stretchFrom: Int32Array;
   readonly stretchTo: Int32Array;
@@ -161,6 +163,8 @@ class Cast {
   readonly rowFrom: number[] = [];
   readonly rowTo: number[] = [];
   readonly around: number[] = [];
+  /** Of each piece, by one of its corners: near enough to put them in order. */
+  private readonly distance: number[] = [];
   private readonly boundStart = [0];
   private readonly farStart = [0];
   private readonly nearStart = [0];
@@ -198,6 +202,7 @@ class Cast {
       this.bounds.add(...pointOn(nx[i], ny[i], x[i], y[i]));
     }
     const ys = y.subarray(first, first + n);
+    this.distance.push(Math.hypot(x[first] - this.lampX, y[first] - this.lampY));
     const corner = (i: number): Corner => [x[at(i)], y[at(i)]];
     if (inside) this.close(null, ys);
     else this.close([corner(begin), corner(end)], ys);
@@ -249,6 +254,9 @@ class Cast {
   toSilhouettes(): Silhouettes {
     return {
       count: this.rowFrom.length,
+      nearestFirst: new Int32Array(
+        this.distance.map((_, k) => k).sort((a, b) => this.distance[a] - this.distance[b]),
+      ),
       ...this.stretches(this.bounds.toArrays()),
       farStart: new Int32Array(this.farStart),
       nearStart: new Int32Array(this.nearStart),
