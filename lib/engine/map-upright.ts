@@ -1,6 +1,6 @@
 import { EDGE, MERGE, SKIN } from '@/lib/geometry/degenerate';
 import type { PlacedTube } from './placed-tube';
-import { RowShadows } from './row-shadows';
+import { RETRACE, RowShadows } from './row-shadows';
 import { castSilhouettes } from './silhouettes';
 import { type Tracer, traceCell } from './tracer';
 import type { GridSurface } from './types';
@@ -120,14 +120,14 @@ function partRun(
   z: number,
   out: Float32Array,
 ): void {
-  const { low, high, count, retrace } = shadows;
+  const { low, high, count } = shadows;
   const half = tube.strength / 2;
   const least = MERGE * tube.length;
   const start = j * columns;
   const dy2 = dy * dy;
   for (let i = first; i < end; i++) {
     if (mask[start + i] === 0) continue;
-    if (retrace[i] === 1) {
+    if (count[i] === RETRACE) {
       out[start + i] += traceCell(tracer, tube, originX + (i + 0.5) * step, originY + (j + 0.5) * step, z);
       continue;
     }

@@ -6,6 +6,9 @@ import type { RowLines, ShadowSides, Silhouettes } from './silhouettes';
 /** Stretches hidden in the middle of the tube that a cell can hold; a cell with more is traced on its own. */
 export const SLOTS = 6;
 
+/** In `count`: the cell is to be traced on its own. */
+export const RETRACE = 255;
+
 /**
  * Where the sector of side n, in a chain first ≤ n < end, begins on a row, not before `lo`. Each side's cut begins its
  * sector and ends the one before; going all the way round, the first follows the last.
@@ -43,7 +46,7 @@ function sectorTo(
 
 /**
  * What hides an upright tube from the cells of one grid row, as heights above the surface (metres).
- * Light comes from low..high, less `count` stretches in between; `retrace` marks cells to be traced on their own.
+ * Light comes from low..high, less `count` stretches in between; a count of `RETRACE` marks cells to be traced on their own.
  */
 export class RowShadows {
   readonly low: Float64Array;
@@ -52,7 +55,6 @@ export class RowShadows {
   /** Stretch s of column i lies at s·columns + i. */
   readonly from: Float64Array;
   readonly to: Float64Array;
-  readonly retrace: Uint8Array;
   /** Columns that any light may reach; the rest of the row is dark. */
   readonly lit: LitSpans;
   /** Lit columns that nothing touches: the whole tube is seen from them. */
@@ -85,7 +87,6 @@ export class RowShadows {
     this.count = new Uint8Array(columns);
     this.from = new Float64Array(columns * SLOTS);
     this.to = new Float64Array(columns * SLOTS);
-    this.retrace = new Uint8Array(columns);
     this.lit = new LitSpans(columns);
     this.open = new LitSpans(columns);
     const { pieces } = scene;
@@ -157,14 +158,17 @@ export class RowShadows {
   }
 
   private clear(from: number, to: number, v0: number, v1: number): void {
+    const { low, high, count } = this;
     for (let n = 0; n < this.lit.count; n++) {
       const lo = Math.max(from, this.lit.from[n]);
       const hi = Math.min(to, this.lit.to[n]);
       if (lo >= hi) continue;
-      this.low.fill(v0, lo, hi);
-      this.high.fill(v1, lo, hi);
-      this.count.fill(0, lo, hi);
-      this.retrace.fill(0, lo, hi);
+      // By hand: filling short stretches of three arrays costs more in calls than in writing.
+      for (let i = lo; i < hi; i++) {
+        low[i] = v0;
+        high[i] = v1;
+        count[i] = 0;
+      }
     }
   }
 
@@ -348,6 +352,7 @@ export class RowShadows {
       return;
     }
     const slots = this.count[i];
+    if (slots === RETRACE) return;
     for (let slot = slots - 1; slot >= 0; slot--) {
       const at = slot * columns + i;
       if (to < this.from[at] || from > this.to[at]) continue;
@@ -356,7 +361,7 @@ export class RowShadows {
       return;
     }
     if (slots === SLOTS) {
-      this.retrace[i] = 1;
+      this.count[i] = RETRACE;
       return;
     }
     this.from[slots * columns + i] = from;
@@ -380,7 +385,7 @@ export class RowShadows {
       this.drop(sil.jambs, 2 * o + 1, j);
       for (let i = this.lo; i < this.hi; i++) {
         const scale = 1 - near.gLamp[n] / (g0 + near.gi[n] * i);
-        if (this.count[i]++ > 0 || walls.transmittance[o] < 1) this.retrace[i] = 1;
+        this.count[i] = this.count[i] > 0 || walls.transmittance[o] < 1 ? RETRACE : 1;
         const sill = (walls.sill[o] - z) * scale;
         const head = (walls.head[o] - z) * scale;
         if (sill > this.low[i]) this.low[i] = sill;
@@ -389,7 +394,7 @@ export class RowShadows {
     }
     for (let i = lo; i < hi; i++) {
       if (this.count[i] === 0) this.low[i] = v1;
-      this.count[i] = 0;
+      else if (this.count[i] === 1) this.count[i] = 0;
     }
   }
 }
