@@ -154,6 +154,27 @@ export function castSilhouettes(
 
 type Corner = readonly [x: number, y: number];
 
+const isFar = ({ nx, ny, c }: Pieces, side: number, lampX: number, lampY: number): boolean =>
+  nx[side] * lampX + ny[side] * lampY <= c[side];
+
+const cornerOf = ({ x, y }: Pieces, i: number): Corner => [x[i], y[i]];
+
+/** Two points along a wall, in the order a sweep round the lamp meets them. */
+function sweepOf(
+  { ax, ay, ux, uy }: Walls,
+  k: number,
+  side: number,
+  low: number,
+  high: number,
+): [Corner, Corner] {
+  const first = side > 0 ? high : low;
+  const last = side > 0 ? low : high;
+  return [
+    [ax[k] + first * ux[k], ay[k] + first * uy[k]],
+    [ax[k] + last * ux[k], ay[k] + last * uy[k]],
+  ];
+}
+
 class Cast {
   private readonly bounds: LineList;
   private readonly far: SideList;
@@ -181,57 +202,66 @@ class Cast {
   }
 
   /** Rings turn x towards y, so along the far sides the sweep runs with the ring and along the near sides against it. */
-  piece({ start, x, y, nx, ny, c }: Pieces, k: number): void {
+  piece(pieces: Pieces, k: number): void {
+    const { start, x, y, nx, ny, c } = pieces;
+    const { lampX, lampY } = this;
     const first = start[k];
     const n = start[k + 1] - first;
-    const at = (i: number) => first + ((i + n) % n);
-    const isFar = (i: number) => nx[at(i)] * this.lampX + ny[at(i)] * this.lampY <= c[at(i)];
     let begin = 0;
-    while (begin < n && !(isFar(begin) && !isFar(begin - 1))) begin++;
+    while (
+      begin < n &&
+      !(
+        isFar(pieces, first + begin, lampX, lampY) &&
+        !isFar(pieces, first + ((begin + n - 1) % n), lampX, lampY)
+      )
+    )
+      begin++;
     const inside = begin === n;
     if (inside) begin = 0;
     let end = begin;
-    while (end < begin + n && isFar(end)) {
-      const i = at(end);
+    while (end < begin + n && isFar(pieces, first + (end % n), lampX, lampY)) {
+      const i = first + (end % n);
       this.far.add(nx[i], ny[i], c[i], x[i], y[i]);
       end++;
     }
     for (let j = begin + n - 1; j >= end; j--) {
-      const i = at(j);
-      this.near.add(nx[i], ny[i], c[i], x[at(j + 1)], y[at(j + 1)]);
-      this.bounds.add(...pointOn(nx[i], ny[i], x[i], y[i]));
+      const i = first + (j % n);
+      const next = first + ((j + 1) % n);
+      this.near.add(nx[i], ny[i], c[i], x[next], y[next]);
+      this.bounds.add(x[i], y[i], -nx[i], -ny[i]);
     }
-    const ys = y.subarray(first, first + n);
-    this.distance.push(Math.hypot(x[first] - this.lampX, y[first] - this.lampY));
-    const corner = (i: number): Corner => [x[at(i)], y[at(i)]];
-    if (inside) this.close(null, ys);
-    else this.close([corner(begin), corner(end)], ys);
+    this.distance.push(Math.hypot(x[first] - lampX, y[first] - lampY));
+    let [low, high] = [Infinity, -Infinity];
+    for (let i = first; i < first + n; i++) {
+      low = Math.min(low, y[i]);
+      high = Math.max(high, y[i]);
+    }
+    if (inside) this.close(null, low, high);
+    else this.close([cornerOf(pieces, first + (begin % n)), cornerOf(pieces, first + (end % n))], low, high);
   }
 
-  wall({ ax, ay, ux, uy, length, start, from, to }: Walls, k: number): void {
-    const point = (along: number): Corner => [ax[k] + along * ux[k], ay[k] + along * uy[k]];
+  wall(walls: Walls, k: number): void {
+    const { ax, ay, ux, uy, length, start, from, to } = walls;
     // The normal that points to the lamp; the sweep meets b first when a lies to its right.
     const distance = uy[k] * (this.lampX - ax[k]) - ux[k] * (this.lampY - ay[k]);
     const side = distance > 0 ? 1 : -1;
     const [nx, ny] = [side * uy[k], -side * ux[k]];
-    const sweep = (low: number, high: number): [Corner, Corner] =>
-      side > 0 ? [point(high), point(low)] : [point(low), point(high)];
-    const ends = sweep(-SKIN, length[k] + SKIN);
+    const ends = sweepOf(walls, k, side, -SKIN, length[k] + SKIN);
     this.near.add(nx, ny, nx * ax[k] + ny * ay[k], ...ends[0]);
     // Beyond the wall by more than the skin, so that a receiver on it is not hidden by it.
-    this.bounds.add(...pointOn(nx, ny, ends[0][0] - SKIN * nx, ends[0][1] - SKIN * ny));
+    this.bounds.add(ends[0][0] - SKIN * nx, ends[0][1] - SKIN * ny, -nx, -ny);
     for (let o = start[k]; o < start[k + 1]; o++) {
-      for (const [x, y] of sweep(from[o], to[o])) {
+      for (const [x, y] of sweepOf(walls, k, side, from[o], to[o])) {
         this.jambs.add(this.lampX, this.lampY, -(y - this.lampY), x - this.lampX);
       }
     }
-    this.close(ends, Float64Array.of(ends[0][1], ends[1][1]));
+    this.close(ends, Math.min(ends[0][1], ends[1][1]), Math.max(ends[0][1], ends[1][1]));
     // A lamp on the wall's line is not hidden by it.
     if (Math.abs(distance) <= SKIN) this.rowTo[this.rowTo.length - 1] = -1;
   }
 
   /** Ends a caster: the rays through its outermost corners, first and last in the sweep, and the rows they leave it. */
-  private close(outermost: readonly [Corner, Corner] | null, ys: Float64Array): void {
+  private close(outermost: readonly [Corner, Corner] | null, lowY: number, highY: number): void {
     const { lampX, lampY, frame } = this;
     let rowFrom = 0;
     let rowTo = frame.rows - 1;
@@ -239,9 +269,10 @@ class Cast {
       const [first, last] = outermost;
       this.bounds.add(lampX, lampY, -(first[1] - lampY), first[0] - lampX);
       this.bounds.add(lampX, lampY, last[1] - lampY, -(last[0] - lampX));
-      const row = (y: number) => (y - frame.originY) / frame.step - 0.5;
-      if (first[1] >= lampY && last[1] >= lampY) rowFrom = Math.max(0, Math.ceil(row(Math.min(...ys))));
-      if (first[1] <= lampY && last[1] <= lampY) rowTo = Math.min(rowTo, Math.floor(row(Math.max(...ys))));
+      if (first[1] >= lampY && last[1] >= lampY)
+        rowFrom = Math.max(0, Math.ceil((lowY - frame.originY) / frame.step - 0.5));
+      if (first[1] <= lampY && last[1] <= lampY)
+        rowTo = Math.min(rowTo, Math.floor((highY - frame.originY) / frame.step - 0.5));
     }
     this.rowFrom.push(rowFrom);
     this.rowTo.push(rowTo);
@@ -332,11 +363,3 @@ function cutColumns(
   }
   return cutAt;
 }
-
-/** The inside of a side as a line to be kept on: through (x, y), counted against the outward normal. */
-const pointOn = (nx: number, ny: number, x: number, y: number): [number, number, number, number] => [
-  x,
-  y,
-  -nx,
-  -ny,
-];
