@@ -95,9 +95,10 @@ export function shadeGeneral(
   const first = start[k];
   const sides = start[k + 1] - first;
   const { faces } = buffer;
-  // Faces that cut the triangle; one that has all of it outside means that nothing is hidden.
+  // Faces that cut the triangle; one that has all of it outside means that nothing is hidden. Underside and top come first:
+  // most pieces near the way are passed over or under.
   let cutting = 0;
-  for (let i = 0; i < sides + 2; i++) {
+  for (let i = sides + 1; i >= 0; i--) {
     // g0 + gs·s + gw·w ≤ 0 keeps the inside of this face.
     let g0: number;
     let gs: number;
@@ -163,8 +164,12 @@ export function shadeGeneral(
     }
     if (kept < 3) return false;
     corners = kept;
-    [s, s2] = [s2, s];
-    [w, w2] = [w2, w];
+    const usedS = s;
+    const usedW = w;
+    s = s2;
+    w = w2;
+    s2 = usedS;
+    w2 = usedW;
   }
   let lo = Infinity;
   let hi = -Infinity;

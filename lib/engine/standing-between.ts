@@ -86,11 +86,23 @@ export class StandingBetween {
 
   /** Narrows the block's pieces once more, to one receiver in it. */
   focus(x: number, y: number, z: number, lamp: LampCylinder): void {
+    // One piece is looked at as quickly as it is ruled out.
+    if (this.blockCount <= 1) return;
     this.pieceCount = 0;
     for (let i = 0; i < this.blockCount; i++) {
       const k = this.block[i];
-      if (this.canStand(k, x, y, 0, z, z, lamp)) this.pieces[this.pieceCount++] = k;
+      if (this.canStand(k, x, y, 0, z, z, lamp) && !this.apart(k, x, y, lamp))
+        this.pieces[this.pieceCount++] = k;
     }
+  }
+
+  /** Is there a side of piece k with the receiver and all the lamps outside it? Then no ray between them meets the piece. */
+  private apart(k: number, x: number, y: number, lamp: LampCylinder): boolean {
+    const { start, nx, ny, c } = this.scene.pieces;
+    for (let i = start[k]; i < start[k + 1]; i++) {
+      if (nx[i] * x + ny[i] * y > c[i] && nx[i] * lamp.x + ny[i] * lamp.y - c[i] > lamp.radius) return true;
+    }
+    return false;
   }
 
   /** A piece that hid everything is looked at first from now on: it most likely hides the neighbours' light too. */
