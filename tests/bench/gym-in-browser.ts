@@ -35,6 +35,8 @@ try {
   await page.getByRole('button', { name: 'Sign in' }).click();
   await page.waitForURL('**/sites');
 
+  // Functions sent to the page carry the compiler's naming helper, which is not there.
+  await page.addInitScript('globalThis.__name = (named) => named;');
   // From the first sight of the sheet to the figure of the full map.
   await page.addInitScript(() => {
     const seen = { sheet: 0, map: 0 };
