@@ -31,8 +31,47 @@ function strokeSegments(context: Konva.Context, segments: readonly number[]) {
   }
 }
 
-/** The dose map on the sheet: colour steps, hatching and a drawn edge round what is under target. Metres. */
-export function DoseLayer({ grid, ratio: coarse }: { grid: GridSurface; ratio: Float32Array }) {
+/**
+ * The dose map on the sheet: colour steps, hatching and a drawn edge round what is under target. Metres. While it follows
+ * the hand it is drawn as one image; edges and lines come when the hand rests.
+ */
+export function DoseLayer({
+  grid,
+  ratio,
+  moving,
+}: {
+  grid: GridSurface;
+  ratio: Float32Array;
+  moving: boolean;
+}) {
+  const canvas = useMemo(
+    () => (moving ? toCanvas(grid.columns, grid.rows, doseImage(grid, ratio, true)) : null),
+    [grid, ratio, moving],
+  );
+  if (!canvas) return <FineDose grid={grid} ratio={ratio} />;
+  return <MapImage canvas={canvas} grid={grid} />;
+}
+
+function MapImage({ canvas, grid }: { canvas: HTMLCanvasElement; grid: GridSurface }) {
+  return (
+    <Shape
+      listening={false}
+      perfectDrawEnabled={false}
+      sceneFunc={(context) => {
+        context.imageSmoothingEnabled = false;
+        context.drawImage(
+          canvas,
+          grid.originX,
+          grid.originY,
+          grid.columns * grid.step,
+          grid.rows * grid.step,
+        );
+      }}
+    />
+  );
+}
+
+function FineDose({ grid, ratio: coarse }: { grid: GridSurface; ratio: Float32Array }) {
   const pxPerMetre = useSheetScale();
   // A drawn cell is about two pixels: no stairs where the eye would see them, no work where it would not.
   const parts = Math.max(1, Math.min(4, Math.round((grid.step * pxPerMetre) / 2)));
@@ -48,16 +87,9 @@ export function DoseLayer({ grid, ratio: coarse }: { grid: GridSurface; ratio: F
     () => hatchLines(surface, (cell) => ratio[cell] < 1, spacing),
     [surface, ratio, spacing],
   );
-  const width = surface.columns * surface.step;
-  const height = surface.rows * surface.step;
   return (
     <Group listening={false}>
-      <Shape
-        sceneFunc={(context) => {
-          context.imageSmoothingEnabled = false;
-          context.drawImage(canvas, surface.originX, surface.originY, width, height);
-        }}
-      />
+      <MapImage canvas={canvas} grid={surface} />
       <Shape
         stroke={UMBER}
         opacity={0.75}

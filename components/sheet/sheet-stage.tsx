@@ -136,10 +136,11 @@ export function SheetStage(props: SheetStageProps) {
           >
             <SheetScaleProvider value={viewport.scale}>
               <Layer listening={false}>
-                <InPlan viewport={viewport}>
-                  {props.underlay}
-                  {props.children}
-                </InPlan>
+                <InPlan viewport={viewport}>{props.underlay}</InPlan>
+              </Layer>
+              {/* A canvas of its own: a map that follows the hand does not draw the room again. */}
+              <Layer listening={false}>
+                <InPlan viewport={viewport}>{props.children}</InPlan>
               </Layer>
               <Layer>
                 <InPlan viewport={viewport}>{props.overlay}</InPlan>

@@ -99,7 +99,11 @@ export function DoseSheet({
         label={`Dose map of the room with ${set.stops.length} stops and ${set.passes.length} passes. The ledger lists them, the gaps and the touch points.`}
         titleBlock={titleBlock}
         cursor={tool === 'select' ? 'default' : 'crosshair'}
-        underlay={grid && picture && lit ? <DoseLayer grid={grid} ratio={picture.ratio} /> : null}
+        underlay={
+          grid && picture && lit ? (
+            <DoseLayer grid={grid} ratio={picture.ratio} moving={dose.settledFor !== set} />
+          ) : null
+        }
         overlay={
           <>
             {strips && picture && lit ? (

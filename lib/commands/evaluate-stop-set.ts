@@ -1,6 +1,7 @@
 import {
   addDose,
   coverage,
+  doseReached,
   findGaps,
   type GapCause,
   gapCauses,
@@ -105,7 +106,7 @@ export function evaluateStopSet(file: RoomFile, options: EvaluateOptions): Evalu
     cells: covered.cells,
     targetMet: covered.share,
     lowestRatio: covered.lowestRatio,
-    p5Ratio: covered.p5Ratio,
+    p5Ratio: doseReached(surface, dose, 0.05) / target,
     lampOnSeconds: times.lampOn,
     movingSeconds: times.moving,
     totalSeconds: times.total,

@@ -27,8 +27,6 @@ export interface Coverage {
   readonly share: number;
   /** Least dose ÷ target. */
   readonly lowestRatio: number;
-  /** The ratio that 95 % of the cells reach. */
-  readonly p5Ratio: number;
 }
 
 /** How much of a surface reaches the target (J/m²). */
@@ -38,20 +36,29 @@ export function coverage(
   target: number,
 ): Coverage {
   if (!(target > 0)) throw new Error(`Target dose ${target} J/m² must be more than 0.`);
-  const ratios = new Float32Array(surface.mask.length);
   let cells = 0;
   let met = 0;
+  let lowest = Infinity;
   for (let i = 0; i < dose.length; i++) {
     if (surface.mask[i] === 0) continue;
+    cells++;
     if (dose[i] >= target) met++;
-    ratios[cells++] = dose[i] / target;
+    if (dose[i] < lowest) lowest = dose[i];
   }
-  const sorted = ratios.subarray(0, cells).sort();
   return {
     cells,
     met,
     share: cells === 0 ? 0 : met / cells,
-    lowestRatio: cells === 0 ? 0 : sorted[0],
-    p5Ratio: cells === 0 ? 0 : sorted[Math.floor(0.05 * (cells - 1))],
+    lowestRatio: cells === 0 ? 0 : lowest / target,
   };
+}
+
+/** The dose (J/m²) that all but the share `below` of the counting cells reach; 0 when none counts. Sorts: not for every frame. */
+export function doseReached(
+  surface: Pick<GridSurface, 'mask'>,
+  dose: Float32Array | Float64Array,
+  below: number,
+): number {
+  const counted = dose.filter((_, cell) => surface.mask[cell] !== 0).sort();
+  return counted[Math.floor(below * (counted.length - 1))] ?? 0;
 }

@@ -1,5 +1,5 @@
 export type { Coverage } from './dose';
-export { addDose, coverage, sumDose } from './dose';
+export { addDose, coverage, doseReached, sumDose } from './dose';
 export { UndefinedReadingError } from './errors';
 export type { CausesInput, CausesReport, TimedStop } from './gap-causes';
 export { causesFromDoses, GAP_CAUSES, gapCauses, NO_CAUSE } from './gap-causes';

@@ -74,11 +74,12 @@ try {
       if (drag.running) requestAnimationFrame(tick);
     };
     requestAnimationFrame(tick);
-    const figure = document.querySelector('[data-figure="target-met"]');
-    if (figure)
-      new MutationObserver(() => {
-        drag.repaints++;
-      }).observe(figure, { characterData: true, subtree: true, childList: true });
+    // Every map that is drawn is put into a canvas of its own.
+    const put = CanvasRenderingContext2D.prototype.putImageData;
+    CanvasRenderingContext2D.prototype.putImageData = function counted(...args: unknown[]) {
+      drag.repaints++;
+      return Reflect.apply(put, this, args);
+    };
   });
   await page.mouse.move(...at(14, 7.5));
   await page.mouse.down();
@@ -101,7 +102,7 @@ try {
   console.log(
     `dragging a stop: ${(drag.frames.length / seconds).toFixed(0)} frames a second, half of them within ` +
       `${sorted[Math.floor(sorted.length / 2)].toFixed(0)} ms, 95 % within ${sorted[Math.floor(sorted.length * 0.95)].toFixed(0)} ms; ` +
-      `the cover figure changed ${(drag.repaints / seconds).toFixed(0)} times a second`,
+      `${(drag.repaints / seconds).toFixed(0)} maps drawn a second`,
   );
   await browser.close();
 } finally {
