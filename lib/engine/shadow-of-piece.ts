@@ -129,6 +129,11 @@ export function shadeGeneral(
     cutting += 3;
   }
 
+  if (endsHidden(faces, cutting, t0, t1)) {
+    shadows.hide(t0, t1);
+    return true;
+  }
+
   let { s, w, s2, w2 } = buffer;
   s[0] = 0;
   w[0] = 0;
@@ -181,4 +186,41 @@ export function shadeGeneral(
   }
   if (lo < hi) shadows.hide(lo, hi);
   return lo <= t0 + MERGE && hi >= t1 - MERGE;
+}
+
+/** A ray must run this share of its way through the solid to count here; closer calls are left to the clipping. */
+const CLEARLY = 1e-6;
+
+/**
+ * Are the rays to t0 and to t1 both stopped, clearly? Then so is every ray between them: the slice is convex, and holds
+ * the line from a point of the one ray to a point of the other, which they all cross.
+ */
+function endsHidden(faces: Float64Array, cutting: number, t0: number, t1: number): boolean {
+  let in0 = 0;
+  let out0 = 1;
+  let in1 = 0;
+  let out1 = 1;
+  for (let f = 0; f < cutting; f += 3) {
+    const g = faces[f];
+    const q0 = g + faces[f + 1] + faces[f + 2] * t0;
+    const q1 = g + faces[f + 1] + faces[f + 2] * t1;
+    if (g > 0) {
+      // Outside at p: the ray enters here, or never.
+      if (q0 >= 0 || q1 >= 0) return false;
+      const enter0 = g / (g - q0);
+      const enter1 = g / (g - q1);
+      if (enter0 > in0) in0 = enter0;
+      if (enter1 > in1) in1 = enter1;
+    } else {
+      if (q0 > 0) {
+        const leave = g / (g - q0);
+        if (leave < out0) out0 = leave;
+      }
+      if (q1 > 0) {
+        const leave = g / (g - q1);
+        if (leave < out1) out1 = leave;
+      }
+    }
+  }
+  return out0 - in0 > CLEARLY && out1 - in1 > CLEARLY;
 }
