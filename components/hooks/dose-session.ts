@@ -82,6 +82,9 @@ export class DoseSession {
   private surface: MapSurface | null = null;
   private fields = new Map<string, HeldField>();
   private inFlight = new Map<string, string>();
+  /** What the picture was added up from, and what the gaps were explained for. */
+  private painted = '';
+  private explained = '';
   private rooms = 0;
   private readonly listeners = new Set<() => void>();
 
@@ -121,6 +124,8 @@ export class DoseSession {
     this.surface = null;
     this.fields = new Map();
     this.inFlight = new Map();
+    this.painted = '';
+    this.explained = '';
     this.say({ pending: 1, asked: 1, failure: null, settledFor: null });
     try {
       const cells = await this.pool.surface(room);
@@ -144,7 +149,12 @@ export class DoseSession {
     for (const id of this.inFlight.keys()) if (!alive.has(id)) this.inFlight.delete(id);
     for (const { id, job } of lamps) {
       const key = JSON.stringify(job);
-      if (this.fields.get(id)?.key === key || this.inFlight.get(id) === key) continue;
+      if (this.fields.get(id)?.key === key) {
+        // Back where it was: what is still on its way is of no use.
+        this.inFlight.delete(id);
+        continue;
+      }
+      if (this.inFlight.get(id) === key) continue;
       this.inFlight.set(id, key);
       this.pool
         .light(id, room, job)
@@ -172,9 +182,25 @@ export class DoseSession {
       this.say({ pending, asked: Math.max(pending, this.view.asked) });
       return;
     }
+    const lamps = lampsOf(input.set, input.emitters);
+    const parts = JSON.stringify([
+      target,
+      lamps.map(({ id, weight }) => [id, this.fields.get(id)?.key, weight]),
+    ]);
+    if (this.view.picture && parts === this.painted) {
+      // Nothing to add up anew: a stop is on its way, or a name has changed.
+      const settled = pending === 0 && parts === this.explained;
+      this.say({
+        pending,
+        asked: Math.max(pending, this.view.asked),
+        settledFor: settled ? input.set : null,
+      });
+      return;
+    }
+    this.painted = parts;
     const dose = new Float32Array(surface.mask.length);
     const touched = new Float64Array(room.spots.length);
-    const shares = lampsOf(input.set, input.emitters).flatMap((lamp) => {
+    const shares = lamps.flatMap((lamp) => {
       const held = this.fields.get(lamp.id);
       if (!held) return [];
       addDose(dose, held.field.map, lamp.weight);
@@ -200,16 +226,18 @@ export class DoseSession {
       pending,
       asked: Math.max(pending, this.view.asked),
     });
-    if (pending === 0) void this.explain(room, dose, target);
+    if (pending === 0) void this.explain(room, dose, target, parts);
   }
 
-  private async explain(room: RoomJob, dose: Float32Array, target: number): Promise<void> {
+  private async explain(room: RoomJob, dose: Float32Array, target: number, parts: string): Promise<void> {
     const { input } = this;
     if (!input) return;
     try {
       const gaps = await this.pool.gaps(room, litPlanOf(input.set, input.emitters), dose, target);
-      if (this.room === room && this.view.picture?.dose === dose)
-        this.say({ gaps, asked: 0, settledFor: input.set });
+      if (this.room !== room || this.painted !== parts) return;
+      this.explained = parts;
+      // By now the set may have other names; as long as nothing is pending it has these gaps.
+      this.say({ gaps, asked: 0, settledFor: this.inFlight.size === 0 ? (this.input?.set ?? null) : null });
     } catch (error) {
       this.fail(error, room);
     }
