@@ -1,3 +1,6 @@
+import { readFileSync } from 'node:fs';
+import { evaluateStopSet } from '@/lib/commands/evaluate-stop-set';
+import type { RoomFile } from '@/lib/room';
 import {
   clickSheet,
   doseSettled,
@@ -14,6 +17,16 @@ import {
 
 test.beforeEach(async ({ page }) => {
   await signIn(page, 'planner');
+});
+
+test('the browser and the command line agree on the target met', async ({ page }) => {
+  // Rooms that no other test leaves changed.
+  for (const room of ['two-bed-bay', 'weights-floor']) {
+    const file: RoomFile = JSON.parse(readFileSync(`db/seed/rooms/${room}.json`, 'utf8'));
+    const { targetMet: share } = evaluateStopSet(file, { plane: 0.75, grid: 0.05 });
+    await openStops(page, room);
+    expect(await targetMet(page)).toBeCloseTo(Math.floor(share * 1000) / 10, 6);
+  }
 });
 
 test('upright faces are a surface of their own: a gap is named by its face and unrolls it', async ({
