@@ -126,7 +126,7 @@ describe('the dose session', () => {
     const failing = {
       ...pool().fake,
       surface: () => Promise.reject(new Error('The worker is gone.')),
-    } as DosePool;
+    } as unknown as DosePool;
     const session = new DoseSession(failing);
     session.show(base);
     await settle();
