@@ -298,33 +298,59 @@ class Cast {
     };
   }
 
-  /** Each caster's stretch on each row: what all its bounds keep. Line by line, so that the loops are plain. */
+  /**
+   * Each caster's stretch on each row: what all its bounds keep. Bound by bound, so that the loops are plain; the rays come
+   * first, and leave most casters few rows for the rest, which later work is told of.
+   */
   private stretches(bounds: RowLines): Pick<Silhouettes, 'stretchFrom' | 'stretchTo'> {
-    const count = this.rowFrom.length;
+    const { rowFrom, rowTo, boundStart } = this;
+    const count = rowFrom.length;
     const { rows, columns } = this.frame;
     const stretchFrom = new Int32Array(rows * count);
     const stretchTo = new Int32Array(rows * count);
     for (let k = 0; k < count; k++) {
-      const rowTo = this.rowTo[k];
-      for (let j = this.rowFrom[k]; j <= rowTo; j++) stretchTo[j * count + k] = columns;
-      for (let b = this.boundStart[k]; b < this.boundStart[k + 1]; b++) {
-        const slope = bounds.slope[b];
-        const column = bounds.column[b];
-        const row = bounds.row[b];
-        if (bounds.isFrom[b] === 1) {
-          for (let j = this.rowFrom[k], at = j * count + k; j <= rowTo; j++, at += count) {
-            const edge = column + slope * (j - row);
-            if (edge > stretchFrom[at]) stretchFrom[at] = edge < columns ? Math.ceil(edge) : columns;
-          }
-        } else {
-          for (let j = this.rowFrom[k], at = j * count + k; j <= rowTo; j++, at += count) {
-            const edge = column + slope * (j - row);
-            if (edge < stretchTo[at] - 1) stretchTo[at] = edge < 0 ? 0 : Math.floor(edge) + 1;
-          }
-        }
+      let first = rowFrom[k];
+      let last = rowTo[k];
+      for (let j = first; j <= last; j++) stretchTo[j * count + k] = columns;
+      const rays = boundStart[k + 1] - 2;
+      for (let b = boundStart[k + 1] - 1; b >= boundStart[k]; b--) {
+        keepBound(bounds, b, first, last, count, k, columns, stretchFrom, stretchTo);
+        if (b !== rays) continue;
+        while (first <= last && stretchFrom[first * count + k] >= stretchTo[first * count + k]) first++;
+        while (first <= last && stretchFrom[last * count + k] >= stretchTo[last * count + k]) last--;
       }
+      rowFrom[k] = first;
+      rowTo[k] = last;
     }
     return { stretchFrom, stretchTo };
+  }
+}
+
+/** Narrows the stretches of caster k on the rows first to last to the counted side of bound b. */
+function keepBound(
+  { column, row, slope, isFrom }: RowLines,
+  b: number,
+  first: number,
+  last: number,
+  count: number,
+  k: number,
+  columns: number,
+  stretchFrom: Int32Array,
+  stretchTo: Int32Array,
+): void {
+  const at0 = column[b];
+  const pivot = row[b];
+  const rise = slope[b];
+  if (isFrom[b] === 1) {
+    for (let j = first, at = j * count + k; j <= last; j++, at += count) {
+      const edge = at0 + rise * (j - pivot);
+      if (edge > stretchFrom[at]) stretchFrom[at] = edge < columns ? Math.ceil(edge) : columns;
+    }
+  } else {
+    for (let j = first, at = j * count + k; j <= last; j++, at += count) {
+      const edge = at0 + rise * (j - pivot);
+      if (edge < stretchTo[at] - 1) stretchTo[at] = edge < 0 ? 0 : Math.floor(edge) + 1;
+    }
   }
 }
 
