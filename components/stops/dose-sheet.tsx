@@ -2,6 +2,7 @@
 
 import { useMemo, useState } from 'react';
 import type { DoseView } from '@/components/hooks/dose-session';
+import { useCalm } from '@/components/hooks/use-calm';
 import { DoseLayer, GapMarks } from '@/components/sheet/dose-layer';
 import { FurnitureLayer } from '@/components/sheet/furniture-layer';
 import { PassesLayer } from '@/components/sheet/passes-layer';
@@ -26,6 +27,9 @@ import type { StopsTool } from './stops-tools';
 
 /** Stops and paths snap to what a crew can read off a tape. */
 const snap = ([x, y]: PlanPoint): PlanPoint => [Number(onGrid(x).toFixed(3)), Number(onGrid(y).toFixed(3))];
+
+/** A map that has stood still for so long is drawn with its lines and edges. */
+const CALM_MS = 180;
 
 /** Pixels from an edge within which a click means that face. */
 const FACE_REACH_PX = 12;
@@ -69,6 +73,7 @@ export function DoseSheet({
   const [tape, setTape] = useState<{ from: PlanPoint; to: PlanPoint; held: boolean } | null>(null);
   const lit = set.stops.length + set.passes.length > 0;
   const { picture } = dose;
+  const calm = useCalm(picture, CALM_MS);
   const grid = picture?.surface.kind === 'grid' ? picture.surface.grid : null;
   const strips = picture?.surface.kind === 'sides' ? picture.surface.strips : null;
   const ratioOf = useMemo(
@@ -100,9 +105,7 @@ export function DoseSheet({
         titleBlock={titleBlock}
         cursor={tool === 'select' ? 'default' : 'crosshair'}
         underlay={
-          grid && picture && lit ? (
-            <DoseLayer grid={grid} ratio={picture.ratio} moving={dose.settledFor !== set} />
-          ) : null
+          grid && picture && lit ? <DoseLayer grid={grid} ratio={picture.ratio} moving={!calm} /> : null
         }
         overlay={
           <>
